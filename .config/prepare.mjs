@@ -1,0 +1,194 @@
+/**
+ * Sets the checkout up, from nothing but Node 20: installs when the lock file changed, builds when
+ * the sources changed, and is silent when there is nothing to do. Every npm script starts with it.
+ * `prepare.mjs install` stops short of the build. Digests, not times, decide what changed, so that a
+ * fresh clone and a switched branch are told apart from an edited file that was put back.
+ */
+import { spawn } from "node:child_process";
+import { createHash } from "node:crypto";
+import {
+  chmodSync,
+  existsSync,
+  mkdirSync,
+  readdirSync,
+  readFileSync,
+  rmSync,
+  statSync,
+  utimesSync,
+  writeFileSync,
+} from "node:fs";
+import { basename, join } from "node:path";
+import { setTimeout as sleep } from "node:timers/promises";
+import { fileURLToPath } from "node:url";
+
+const ROOT = fileURLToPath(new URL("..", import.meta.url));
+const MODULES = join(ROOT, "node_modules");
+const DIST = join(ROOT, "dist");
+const INSTALLED = join(MODULES, ".flatlimit-stamp");
+const BUILT = join(DIST, ".stamp");
+const LOCK = join(ROOT, ".config", ".prepare-lock");
+const BREAKING = `${LOCK}-breaking`;
+
+const HEARTBEAT_MS = 2_000;
+/** A lock whose owner has not been heard of for so long is nobody's. */
+const STALE_MS = 60_000;
+/** A lock without an owner's name yet: its owner is between two system calls, or died there. */
+const NAMELESS_MS = 5_000;
+
+/** @param {string} line */
+const say = (line) => process.stderr.write(`set-up: ${line}\n`);
+
+/** @param {string} line @returns {never} */
+function fail(line) {
+  say(line);
+  process.exit(1);
+}
+
+/** @param {readonly string[]} paths files and folders, relative to the root */
+function digest(paths) {
+  const hash = createHash("sha256");
+  /** @param {string} path */
+  const add = (path) => {
+    const full = join(ROOT, path);
+    const found = fs.statSync(full, { throwIfNoEntry: false });
+    if (found === undefined) return;
+    if (found.isDirectory()) {
+      for (const name of fs.readdirSync(full).sort()) add(`${path}/${name}`);
+    } else {
+      hash.update(`${path}\0${found.size}\0`).update(fs.readFileSync(full));
+    }
+  };
+  paths.forEach(add);
+  return hash.digest("hex");
+}
+
+/** @param {string} path */
+const read = (path) => (fs.existsSync(path) ? fs.readFileSync(path, "utf8").trim() : undefined);
+
+const lockFileDigest = () => digest(["package-lock.json"]);
+const sourcesDigest = () => digest(["package-lock.json", "tsconfig.json", "src"]);
+const isInstalled = () => read(INSTALLED) === lockFileDigest();
+const isBuilt = () => read(BUILT) === sourcesDigest();
+
+/**
+ * Runs a program to its end; its output is shown only when it fails.
+ * @param {string} what for the failure's line
+ * @param {string} command
+ * @param {readonly string[]} args
+ */
+async function run(what, command, args) {
+  const shell = process.platform === "win32" && command === "npm";
+  const child = spawn(command, args, { cwd: ROOT, shell, stdio: ["ignore", "pipe", "pipe"] });
+  const stop = () => child.kill();
+  process.once("exit", stop);
+  /** @type {Buffer[]} */
+  const output = [];
+  child.stdout.on("data", (chunk) => output.push(chunk));
+  child.stderr.on("data", (chunk) => output.push(chunk));
+  const ended = await new Promise((resolve) => {
+    child.once("error", (error) => resolve(error.message));
+    child.once("close", (status, signal) => resolve(signal ?? status));
+  });
+  process.off("exit", stop);
+  if (ended === 0) return;
+  process.stderr.write(Buffer.concat(output));
+  fail(`${what} failed (${ended})`);
+}
+
+async function install() {
+  const stamp = lockFileDigest();
+  say("installing the dependencies of package-lock.json");
+  fs.rmSync(INSTALLED, { force: true });
+  const args = ["ci", "--no-audit", "--no-fund", "--ignore-scripts=false", "--include=dev"];
+  const npm = process.env["npm_execpath"];
+  if (npm !== undefined && basename(npm) === "npm-cli.js") {
+    await run("npm ci", process.execPath, [npm, ...args]);
+  } else {
+    await run("npm ci", "npm", args);
+  }
+  fs.writeFileSync(INSTALLED, `${stamp}\n`);
+}
+
+async function build() {
+  const stamp = sourcesDigest();
+  say("building dist/ from src/");
+  fs.rmSync(DIST, { recursive: true, force: true });
+  const compiler = join(MODULES, "typescript", "bin", "tsc");
+  await run("tsc", process.execPath, [compiler, "-p", "tsconfig.json"]);
+  const main = join(DIST, "cli", "main.js");
+  if (fs.existsSync(main)) fs.chmodSync(main, 0o755);
+  fs.mkdirSync(DIST, { recursive: true });
+  fs.writeFileSync(BUILT, `${stamp}\n`);
+}
+
+/** Makes a folder; false when it is there already. @param {string} path */
+function claim(path) {
+  try {
+    fs.mkdirSync(path);
+    return true;
+  } catch (error) {
+    if (/** @type {NodeJS.ErrnoException} */ (error).code === "EEXIST") return false;
+    throw error;
+  }
+}
+
+/** @param {number} pid */
+function isAlive(pid) {
+  try {
+    process.kill(pid, 0);
+    return true;
+  } catch (error) {
+    return /** @type {NodeJS.ErrnoException} */ (error).code === "EPERM";
+  }
+}
+
+/** @param {string} path */
+const age = (path) => {
+  const found = fs.statSync(path, { throwIfNoEntry: false });
+  return found === undefined ? 0 : Date.now() - found.mtimeMs;
+};
+
+function isStale() {
+  const owner = Number(read(join(LOCK, "owner")) ?? 0);
+  if (owner === 0) return age(LOCK) > NAMELESS_MS;
+  return !isAlive(owner) || age(LOCK) > STALE_MS;
+}
+
+/** Breaks a stale lock; one process at a time, so that nobody breaks the lock that comes next. */
+function breakStaleLock() {
+  if (age(BREAKING) > STALE_MS) fs.rmSync(BREAKING, { recursive: true, force: true });
+  if (!claim(BREAKING)) return;
+  if (isStale()) fs.rmSync(LOCK, { recursive: true, force: true });
+  fs.rmSync(BREAKING, { recursive: true, force: true });
+}
+
+async function takeLock() {
+  let told = false;
+  while (!claim(LOCK)) {
+    if (isStale()) breakStaleLock();
+    else if (!told) {
+      say("waiting for another set-up of this checkout to end");
+      told = true;
+    }
+    await sleep(200);
+  }
+  fs.writeFileSync(join(LOCK, "owner"), `${process.pid}\n`);
+  const isOurs = () => read(join(LOCK, "owner")) === String(process.pid);
+  const beat = () => isOurs() && fs.utimesSync(LOCK, new Date(), new Date());
+  setInterval(beat, HEARTBEAT_MS).unref();
+  process.once("exit", () => isOurs() && fs.rmSync(LOCK, { recursive: true, force: true }));
+  process.once("SIGINT", () => process.exit(130));
+  process.once("SIGTERM", () => process.exit(143));
+}
+
+const mode = process.argv[2] ?? "build";
+if (mode !== "build" && mode !== "install") fail(`expected "build" or "install", got "${mode}"`);
+if (Number(process.versions.node.split(".")[0]) < 20) {
+  fail(`Node 20 or later is needed, this is ${process.versions.node}`);
+}
+const isReady = () => isInstalled() && (mode === "install" || isBuilt());
+if (!isReady()) {
+  await takeLock();
+  if (!isInstalled()) await install();
+  if (mode === "build" && !isBuilt()) await build();
+}
