@@ -7,7 +7,7 @@
 import { spawn } from "node:child_process";
 import { createHash } from "node:crypto";
 import * as fs from "node:fs";
-import { basename, join } from "node:path";
+import { basename, dirname, join, relative } from "node:path";
 import { setTimeout as sleep } from "node:timers/promises";
 import { fileURLToPath } from "node:url";
 
@@ -17,6 +17,7 @@ const DIST = join(ROOT, "dist");
 const INSTALLED = join(MODULES, ".flatlimit-stamp");
 const BUILT = join(DIST, ".stamp");
 const LOCK = join(ROOT, ".config", ".prepare-lock");
+const OWNERS = join(LOCK, "owners");
 const BREAKING = `${LOCK}-breaking`;
 
 const HEARTBEAT_MS = 2_000;
@@ -24,6 +25,13 @@ const HEARTBEAT_MS = 2_000;
 const STALE_MS = 60_000;
 /** A lock without an owner's name yet: its owner is between two system calls, or died there. */
 const NAMELESS_MS = 5_000;
+/** What a program that is asked to end may take before it is killed. */
+const GRACE_MS = 2_000;
+
+/** The program that runs now. @type {import("node:child_process").ChildProcess | undefined} */
+let worker;
+/** The exit status, once a signal asked to end. @type {number | undefined} */
+let interrupted;
 
 /** @param {string} line */
 const say = (line) => process.stderr.write(`set-up: ${line}\n`);
@@ -52,8 +60,14 @@ function digest(paths) {
   return hash.digest("hex");
 }
 
-/** @param {string} path */
-const read = (path) => (fs.existsSync(path) ? fs.readFileSync(path, "utf8").trim() : undefined);
+/** A small file's text; undefined when it is not there (or no longer: others remove files too). @param {string} path */
+function read(path) {
+  try {
+    return fs.readFileSync(path, "utf8").trim();
+  } catch {
+    return undefined;
+  }
+}
 
 const lockFileDigest = () => digest(["package-lock.json"]);
 const sourcesDigest = () => digest(["package-lock.json", "tsconfig.json", "src"]);
@@ -69,8 +83,8 @@ const isBuilt = () => read(BUILT) === sourcesDigest();
 async function run(what, command, args) {
   const shell = process.platform === "win32" && command === "npm";
   const child = spawn(command, args, { cwd: ROOT, shell, stdio: ["ignore", "pipe", "pipe"] });
-  const stop = () => child.kill();
-  process.once("exit", stop);
+  worker = child;
+  writeOwners();
   /** @type {Buffer[]} */
   const output = [];
   child.stdout.on("data", (chunk) => output.push(chunk));
@@ -79,7 +93,8 @@ async function run(what, command, args) {
     child.once("error", (error) => resolve(error.message));
     child.once("close", (status, signal) => resolve(signal ?? status));
   });
-  process.off("exit", stop);
+  worker = undefined;
+  if (interrupted !== undefined) process.exit(interrupted);
   if (ended === 0) return;
   process.stderr.write(Buffer.concat(output));
   fail(`${what} failed (${ended})`);
@@ -89,6 +104,7 @@ async function install() {
   const stamp = lockFileDigest();
   say("installing the dependencies of package-lock.json");
   fs.rmSync(INSTALLED, { force: true });
+  fs.rmSync(BUILT, { force: true });
   const args = ["ci", "--no-audit", "--no-fund", "--ignore-scripts=false", "--include=dev"];
   const npm = process.env["npm_execpath"];
   if (npm !== undefined && basename(npm) === "npm-cli.js") {
@@ -99,14 +115,23 @@ async function install() {
   fs.writeFileSync(INSTALLED, `${stamp}\n`);
 }
 
+/** Lets `npx flatlimit` find the command of this checkout. @param {string} main */
+function linkCommand(main) {
+  if (!fs.existsSync(main)) return;
+  fs.chmodSync(main, 0o755);
+  if (process.platform === "win32") return;
+  const link = join(MODULES, ".bin", "flatlimit");
+  fs.rmSync(link, { force: true });
+  fs.symlinkSync(relative(dirname(link), main), link);
+}
+
 async function build() {
   const stamp = sourcesDigest();
   say("building dist/ from src/");
   fs.rmSync(DIST, { recursive: true, force: true });
   const compiler = join(MODULES, "typescript", "bin", "tsc");
   await run("tsc", process.execPath, [compiler, "-p", "tsconfig.json"]);
-  const main = join(DIST, "cli", "main.js");
-  if (fs.existsSync(main)) fs.chmodSync(main, 0o755);
+  linkCommand(join(DIST, "cli", "main.js"));
   fs.mkdirSync(DIST, { recursive: true });
   fs.writeFileSync(BUILT, `${stamp}\n`);
 }
@@ -138,10 +163,19 @@ const age = (path) => {
   return found === undefined ? 0 : Date.now() - found.mtimeMs;
 };
 
+/** The processes that hold the lock: the set-up and, should it be killed, what it had started. */
+const owners = () => (read(OWNERS) ?? "").split(" ").map(Number).filter(Boolean);
+
+const isOurs = () => owners()[0] === process.pid;
+
+function writeOwners() {
+  fs.writeFileSync(OWNERS, [process.pid, worker?.pid ?? ""].join(" "));
+}
+
 function isStale() {
-  const owner = Number(read(join(LOCK, "owner")) ?? 0);
-  if (owner === 0) return age(LOCK) > NAMELESS_MS;
-  return !isAlive(owner) || age(LOCK) > STALE_MS;
+  const pids = owners();
+  if (pids.length === 0) return age(LOCK) > NAMELESS_MS;
+  return !pids.some(isAlive) || age(LOCK) > STALE_MS;
 }
 
 /** Breaks a stale lock; one process at a time, so that nobody breaks the lock that comes next. */
@@ -162,13 +196,21 @@ async function takeLock() {
     }
     await sleep(200);
   }
-  fs.writeFileSync(join(LOCK, "owner"), `${process.pid}\n`);
-  const isOurs = () => read(join(LOCK, "owner")) === String(process.pid);
+  writeOwners();
   const beat = () => isOurs() && fs.utimesSync(LOCK, new Date(), new Date());
   setInterval(beat, HEARTBEAT_MS).unref();
   process.once("exit", () => isOurs() && fs.rmSync(LOCK, { recursive: true, force: true }));
-  process.once("SIGINT", () => process.exit(130));
-  process.once("SIGTERM", () => process.exit(143));
+  process.on("SIGINT", () => interrupt(130));
+  process.on("SIGTERM", () => interrupt(143));
+}
+
+/** Ends when what runs has ended, lest it go on writing after the lock is gone. @param {number} status */
+function interrupt(status) {
+  interrupted = status;
+  if (worker === undefined) process.exit(status);
+  worker.kill();
+  const dying = worker;
+  setTimeout(() => dying.kill("SIGKILL"), GRACE_MS).unref();
 }
 
 const mode = process.argv[2] ?? "build";
