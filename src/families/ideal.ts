@@ -1,0 +1,42 @@
+/**
+ * An ideal as the commands know it: a ring, one or more generating sets of the same ideal, a default
+ * order, and, for the families, the permutation whose tilings the limit is compared with.
+ */
+import type { Permutation } from "../combinatorics/permutation.js";
+import type { Reading } from "../outcomes/input-fault.js";
+import type { Polynomial } from "../polynomials/polynomial.js";
+import type { PolynomialRing } from "../polynomials/polynomial-ring.js";
+
+/** One generating set of an ideal. */
+export interface GeneratingSet {
+  /** The word that `--generators` takes: `fulton`, `cdg`, `defining`, `given`. */
+  readonly kind: string;
+  /** One line for `--help` and reports. */
+  readonly description: string;
+  /** The generators: non-zero, distinct up to order; made on demand, since large families have many. */
+  polynomials(): readonly Polynomial[];
+}
+
+/** An ideal that can be verified, degenerated and matched. */
+export interface Ideal {
+  /** What names it on the command line: `schubert:2143`, or the problem's path. */
+  readonly name: string;
+  readonly ring: PolynomialRing;
+  /** At least one; all generate the same ideal; the first is the default. */
+  readonly generatingSets: readonly [GeneratingSet, ...GeneratingSet[]];
+  /** Phrase of the order used when none is asked for. */
+  readonly defaultOrder: string;
+  /** Whose tilings its limits are compared with. */
+  readonly permutation?: Permutation;
+}
+
+/** A named family of ideals, `name:argument` on the command line. */
+export interface Family {
+  readonly name: string;
+  /** What the argument is, for `--help`: "a permutation in one-line notation". */
+  readonly argument: string;
+  readonly description: string;
+  readonly example: string;
+  /** Reads the argument and makes the ideal. */
+  read(argument: string): Reading<Ideal>;
+}

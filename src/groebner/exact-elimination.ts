@@ -1,0 +1,184 @@
+/**
+ * Matrix reduction over the integers, without fractions: a row is scaled where a pivot's leading
+ * coefficient does not divide. A row is first tried in doubles, with a running bound that guarantees
+ * every entry below 2⁵³; when the bound gives out it starts again in big integers. The families here
+ * have coefficients ±1, so nearly all their rows stay in doubles.
+ */
+import { gcd } from "../arithmetic/integers.js";
+import type { Budget } from "../outcomes/budget.js";
+import { type ColumnRow, monomialsOf, type RowArithmetic, reduceMatrix } from "./row-arithmetic.js";
+import { type ExactRow, primitiveRow } from "./rows.js";
+
+interface PivotRow extends ColumnRow {
+  readonly coefficients: readonly bigint[];
+  readonly small: Float64Array | undefined;
+  /** The largest absolute value in `small`. */
+  readonly height: number;
+}
+
+const EXACT_LIMIT = Number.MAX_SAFE_INTEGER;
+/** After this many scalings by big integers the content of the row is divided out. */
+const SCALINGS_BETWEEN_CONTENTS = 8;
+
+/** Row arithmetic over the integers: primitive rows, exact results. */
+export function exactArithmetic(): RowArithmetic<ExactRow> {
+  return {
+    eliminate(matrix, elements, mode, budget) {
+      const width = matrix.monomials.length;
+      const accumulator = new Float64Array(width);
+      return reduceMatrix<PivotRow, ExactRow>(matrix, mode, {
+        load: ({ columns, element }) => pivotRow(columns, elements[element] as ExactRow),
+        reduce(row, pivots, from) {
+          budget.spend(() => `reducing a matrix of ${width} columns exactly`);
+          const { reduced } =
+            reduceInDoubles(row, pivots, accumulator, from) ??
+            reduceInBigIntegers(row, pivots, width, from, budget);
+          return reduced;
+        },
+        store: ({ coefficients, small, ...row }) => ({
+          monomials: monomialsOf(matrix, row),
+          coefficients,
+          small,
+        }),
+      });
+    },
+  };
+}
+
+function pivotRow(columns: Int32Array, row: ExactRow): PivotRow {
+  let height = 0;
+  for (const c of row.small ?? []) height = Math.max(height, Math.abs(c));
+  return { columns, coefficients: row.coefficients, small: row.small, height };
+}
+
+/** The reduced row (undefined: it is zero); undefined altogether when doubles do not suffice. */
+function reduceInDoubles(
+  row: PivotRow,
+  pivots: readonly (PivotRow | undefined)[],
+  accumulator: Float64Array,
+  from: number,
+): { readonly reduced: PivotRow | undefined } | undefined {
+  if (row.small === undefined) return undefined;
+  const start = row.columns[0] as number;
+  accumulator.fill(0, start);
+  for (let k = 0; k < row.columns.length; k++) {
+    accumulator[row.columns[k] as number] = row.small[k] as number;
+  }
+  let bound = row.height;
+  for (let column = from; column < accumulator.length; column++) {
+    const value = accumulator[column] as number;
+    if (value === 0) continue;
+    const pivot = pivots[column];
+    if (pivot === undefined) continue;
+    if (pivot.small === undefined) return undefined;
+    const lead = pivot.small[0] as number;
+    const common = gcdOfDoubles(value, lead);
+    const scale = lead / common;
+    const multiplier = value / common;
+    const growth = Math.abs(multiplier) * pivot.height;
+    if (bound * scale + growth > EXACT_LIMIT) {
+      bound = largestFrom(accumulator, start);
+      if (bound * scale + growth > EXACT_LIMIT) return undefined;
+    }
+    bound = bound * scale + growth;
+    if (scale !== 1) {
+      for (let c = start; c < accumulator.length; c++) {
+        accumulator[c] = (accumulator[c] as number) * scale;
+      }
+    }
+    const { columns, small } = pivot;
+    for (let k = 0; k < columns.length; k++) {
+      const c = columns[k] as number;
+      accumulator[c] = (accumulator[c] as number) - multiplier * (small[k] as number);
+    }
+  }
+  return { reduced: gather(start, accumulator.length, (c) => BigInt(accumulator[c] as number)) };
+}
+
+function reduceInBigIntegers(
+  row: PivotRow,
+  pivots: readonly (PivotRow | undefined)[],
+  width: number,
+  from: number,
+  budget: Budget,
+): { readonly reduced: PivotRow | undefined } {
+  const start = row.columns[0] as number;
+  const entries = new Array<bigint>(width).fill(0n);
+  for (let k = 0; k < row.columns.length; k++) {
+    entries[row.columns[k] as number] = row.coefficients[k] as bigint;
+  }
+  let scalings = 0;
+  for (let column = from; column < width; column++) {
+    const value = entries[column] as bigint;
+    if (value === 0n) continue;
+    const pivot = pivots[column];
+    if (pivot === undefined) continue;
+    budget.spend(() => `reducing a matrix of ${width} columns in big integers`);
+    const lead = pivot.coefficients[0] as bigint;
+    const common = gcd(value, lead);
+    const scale = lead / common;
+    const multiplier = value / common;
+    if (scale !== 1n) {
+      for (let c = start; c < width; c++) {
+        if (entries[c] !== 0n) entries[c] = (entries[c] as bigint) * scale;
+      }
+      scalings++;
+    }
+    const { columns, coefficients } = pivot;
+    for (let k = 0; k < columns.length; k++) {
+      const c = columns[k] as number;
+      entries[c] = (entries[c] as bigint) - multiplier * (coefficients[k] as bigint);
+    }
+    if (scalings >= SCALINGS_BETWEEN_CONTENTS) {
+      divideByContent(entries, start);
+      scalings = 0;
+    }
+  }
+  return { reduced: gather(start, width, (c) => entries[c] as bigint) };
+}
+
+function divideByContent(entries: bigint[], start: number): void {
+  let content = 0n;
+  for (let c = start; c < entries.length; c++) {
+    if (entries[c] !== 0n) content = gcd(content, entries[c] as bigint);
+    if (content === 1n) return;
+  }
+  if (content === 0n) return;
+  for (let c = start; c < entries.length; c++) {
+    if (entries[c] !== 0n) entries[c] = (entries[c] as bigint) / content;
+  }
+}
+
+function gather(
+  start: number,
+  width: number,
+  entry: (column: number) => bigint,
+): PivotRow | undefined {
+  const columns: number[] = [];
+  const coefficients: bigint[] = [];
+  for (let column = start; column < width; column++) {
+    const value = entry(column);
+    if (value === 0n) continue;
+    columns.push(column);
+    coefficients.push(value);
+  }
+  if (columns.length === 0) return undefined;
+  const primitive = primitiveRow(Int32Array.from(columns), coefficients);
+  return pivotRow(primitive.monomials, primitive);
+}
+
+function largestFrom(accumulator: Float64Array, start: number): number {
+  let largest = 0;
+  for (let c = start; c < accumulator.length; c++) {
+    largest = Math.max(largest, Math.abs(accumulator[c] as number));
+  }
+  return largest;
+}
+
+/** The positive greatest common divisor of two non-zero integers below 2⁵³. */
+function gcdOfDoubles(a: number, b: number): number {
+  let x = Math.abs(a);
+  let y = Math.abs(b);
+  while (y !== 0) [x, y] = [y, x % y];
+  return x;
+}

@@ -1,0 +1,100 @@
+/**
+ * Buchberger's criterion, exactly: a set is a Gröbner basis of what it generates when the S-polynomials
+ * of its critical pairs reduce to zero. Superfluous pairs are dropped by the criteria of Gebauer and
+ * Möller; the rest are reduced over the integers, one matrix a degree, up to the first failure.
+ */
+import type { Budget } from "../outcomes/budget.js";
+import type { MonomialId, MonomialTable } from "../polynomials/monomial-table.js";
+import { CriticalPairs } from "./critical-pairs.js";
+import { DivisorSearch } from "./divisor-search.js";
+import { exactArithmetic } from "./exact-elimination.js";
+import { matrixOfPairs } from "./f4.js";
+import { type ExactRow, leadingMonomial } from "./rows.js";
+import { type MatrixRow, SymbolicPreprocessing } from "./symbolic-preprocessing.js";
+
+/** A pair whose S-polynomial does not reduce to zero. */
+export interface FailingPair {
+  /** Indices into the rows given. */
+  readonly first: number;
+  readonly second: number;
+  /** The full normal form of the S-polynomial: no leading monomial of the set divides a term of it. */
+  readonly remainder: ExactRow;
+}
+
+/** The outcome of the check; `pairs` counts the S-polynomials that were reduced. */
+export interface PairCheck {
+  readonly failing: FailingPair | undefined;
+  readonly pairs: number;
+}
+
+/**
+ * Checks every critical pair of the rows; in case of failure the first failing pair by degree, then by
+ * lcm. @throws LimitReached
+ */
+export function checkPairs(
+  table: MonomialTable,
+  rows: readonly ExactRow[],
+  budget: Budget,
+): PairCheck {
+  const { pairs, divisors } = pairsOf(table, rows);
+  const matrices = new SymbolicPreprocessing(table);
+  const arithmetic = exactArithmetic();
+  const total = pairs.size;
+  let reduced = 0;
+  while (pairs.size > 0) {
+    budget.spend(() => `reducing S-pair ${reduced + 1} of ${total}`);
+    const request = matrixOfPairs(table, pairs.take(pairs.nextSugar), rows);
+    const matrix = matrices.build(request, rows, divisors, budget);
+    const [remainder] = arithmetic.eliminate(matrix, rows, "independent", budget);
+    reduced += request.rows.length;
+    if (remainder !== undefined) {
+      const { columns, element } = matrix.rows[remainder.source] as MatrixRow;
+      const partner = matrix.pivots[columns[0] as number] as MatrixRow;
+      return {
+        failing: { first: partner.element, second: element, remainder: remainder.row },
+        pairs: reduced,
+      };
+    }
+  }
+  return { failing: undefined, pairs: reduced };
+}
+
+/** Does every one of the polynomials reduce to zero by the basis, exactly? @throws LimitReached */
+export function reduceToZero(
+  table: MonomialTable,
+  polynomials: readonly ExactRow[],
+  basis: readonly ExactRow[],
+  budget: Budget,
+): boolean {
+  const elements = [...basis, ...polynomials];
+  const divisors = new DivisorSearch(table);
+  basis.forEach((row, k) => {
+    divisors.add(k, leadingMonomial(row));
+  });
+  const rows = polynomials.map((_, k) => ({ element: basis.length + k, multiplier: table.one }));
+  const matrix = new SymbolicPreprocessing(table).build(
+    { rows, pivots: [] },
+    elements,
+    divisors,
+    budget,
+  );
+  return exactArithmetic().eliminate(matrix, elements, "independent", budget).length === 0;
+}
+
+/* Smallest leading monomials first, so that redundant elements drop out of later pairs at once. */
+function pairsOf(
+  table: MonomialTable,
+  rows: readonly ExactRow[],
+): { readonly pairs: CriticalPairs; readonly divisors: DivisorSearch } {
+  const pairs = new CriticalPairs(table);
+  const divisors = new DivisorSearch(table);
+  const ascending = rows
+    .map((row, index) => ({ index, lead: leadingMonomial(row), row }))
+    .sort((a, b) => table.compare(a.lead, b.lead) || a.index - b.index);
+  for (const { index, lead, row } of ascending) {
+    const degree = row.monomials.reduce((d, id) => Math.max(d, table.degree(id as MonomialId)), 0);
+    pairs.add(index, lead, degree);
+    divisors.add(index, lead);
+  }
+  return { pairs, divisors };
+}
