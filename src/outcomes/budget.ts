@@ -7,7 +7,8 @@
 /** Why a computation stopped before it had an answer. */
 export interface Undecided {
   readonly kind: "undecided";
-  readonly limit: "seconds" | "bytes" | "cancelled" | "size";
+  /** `size`: a number or table grew too large; `method`: there is no method for this input yet. */
+  readonly limit: "seconds" | "bytes" | "cancelled" | "size" | "method";
   /** What was reached, in one clause: "after 10.0 s, in degree 7 with 412 elements". */
   readonly reason: string;
 }

@@ -1,0 +1,56 @@
+/** The flat limit of an ideal with everything that is read off it: components, multiplicities, degree. */
+import { codimensionOf, degreeOf, hilbertNumerator } from "../components/hilbert-numerator.js";
+import { type PrimaryComponent, primaryComponents } from "../components/primary-components.js";
+import { type FlatLimit, flatLimit } from "../limits/flat-limit.js";
+import { type Budget, type Undecided, withinBudget } from "../outcomes/budget.js";
+import { isSquarefree } from "../polynomials/monomial-ideal.js";
+import type { Question } from "./question.js";
+
+/** A flat limit, described. */
+export interface LimitDescription extends Question {
+  readonly kind: "limit-description";
+  readonly evidence: "proved";
+  readonly limit: FlatLimit;
+  readonly squarefree: boolean;
+  readonly codimension: number;
+  readonly degree: bigint;
+  /** All primary components, embedded ones too; or why the decomposition was not reached. */
+  readonly components: readonly PrimaryComponent[] | Undecided;
+  /** No embedded component; null when undecided. */
+  readonly unmixed: boolean | null;
+}
+
+/** Computes and describes the limit. @returns `Undecided` when even the limit was not reached. */
+export function describeLimit(question: Question, budget: Budget): LimitDescription | Undecided {
+  const limit = flatLimit(question.generators.polynomials(), question.order, budget);
+  if (limit.kind === "undecided") return limit;
+  const { leadingIdeal, monomial } = limit;
+  return withinBudget((): LimitDescription => {
+    const numerator = hilbertNumerator(leadingIdeal, budget);
+    const components = monomial ? primaryComponents(leadingIdeal, budget) : notMonomial();
+    return {
+      ...question,
+      kind: "limit-description",
+      evidence: "proved",
+      limit,
+      squarefree: monomial && isSquarefree(leadingIdeal),
+      codimension: codimensionOf(numerator),
+      degree: degreeOf(numerator),
+      components,
+      unmixed: isList(components) ? components.every((c) => !c.embedded) : null,
+    };
+  });
+}
+
+/** Was the decomposition reached? */
+export function isList<T>(found: readonly T[] | Undecided): found is readonly T[] {
+  return Array.isArray(found);
+}
+
+function notMonomial(): Undecided {
+  return {
+    kind: "undecided",
+    limit: "method",
+    reason: "the limit is not a monomial ideal, and only monomial limits are decomposed so far",
+  };
+}

@@ -1,0 +1,93 @@
+/**
+ * Runs one request in a worker thread, so that the main thread stays free to answer: Ctrl-C ends at
+ * once and says what was reached, and a computation that overruns its budget without noticing is ended
+ * as undecided.
+ */
+import { totalmem } from "node:os";
+import { Worker } from "node:worker_threads";
+import { OutputClosed, writeAll } from "./output.js";
+import { EXIT, type JobRequest, type WorkerMessage } from "./request.js";
+
+/** Seconds that a worker may take over its budget to notice it. */
+const GRACE = 3;
+/** The part of the machine's memory that a worker's heap may take when nothing else is asked. */
+const HEAP_SHARE = 0.75;
+const MEBIBYTE = 2 ** 20;
+
+/** Runs the request; the result is the exit status of the program. */
+export function launch(request: JobRequest): Promise<number> {
+  const started = performance.now();
+  const heap = Math.floor((request.memory ?? totalmem() * HEAP_SHARE) / MEBIBYTE);
+  const worker = new Worker(new URL("./worker.js", import.meta.url), {
+    workerData: request,
+    resourceLimits: { maxOldGenerationSizeMb: Math.max(heap, 16) },
+  });
+  let stage = "starting";
+  const showsProgress = !request.quiet && process.stderr.isTTY === true;
+  const clearProgress = (): void => {
+    if (showsProgress) process.stderr.write("\r\u001b[K");
+  };
+  return new Promise((resolve) => {
+    const finish = (status: number): void => {
+      clearTimeout(overrun);
+      clearProgress();
+      resolve(status);
+      void worker.terminate();
+    };
+    const elapsed = (): string => `${((performance.now() - started) / 1000).toFixed(1)} s`;
+    const undecided = (reason: string): void => {
+      if (request.json) {
+        const { subject, job } = request;
+        say(
+          1,
+          JSON.stringify({
+            command: job,
+            ideal: subject,
+            verdict: "undecided",
+            evidence: "undecided",
+            reason,
+          }),
+        );
+      }
+      say(2, `flatlimit: undecided: ${reason}`);
+      finish(EXIT.undecided);
+    };
+    const interrupt = (status: number) => (): void => {
+      clearProgress();
+      say(2, `flatlimit: interrupted after ${elapsed()}: ${stage}`);
+      finish(status);
+    };
+    const overrun = setTimeout(
+      () => undecided(`after ${elapsed()}, ${stage}`),
+      Math.min(((request.seconds ?? Infinity) + GRACE) * 1000, 2 ** 31 - 1),
+    );
+    process.on("SIGINT", interrupt(EXIT.interrupted));
+    process.on("SIGTERM", interrupt(EXIT.terminated));
+    worker.on("message", (message: WorkerMessage) => {
+      if (message.kind === "done") {
+        finish(message.status);
+        return;
+      }
+      stage = message.stage;
+      if (showsProgress) {
+        const width = (process.stderr.columns ?? 80) - 1;
+        process.stderr.write(`\r\u001b[K${`${elapsed()}  ${stage}`.slice(0, width)}`);
+      }
+    });
+    worker.on("error", (error: Error & { code?: string }) => {
+      if (error.code === "ERR_WORKER_OUT_OF_MEMORY") undecided(`the memory was used up, ${stage}`);
+      else {
+        say(2, `flatlimit: internal fault: ${error.message}`);
+        finish(EXIT.fault);
+      }
+    });
+  });
+}
+
+function say(descriptor: 1 | 2, line: string): void {
+  try {
+    writeAll(descriptor, `${line}\n`);
+  } catch (error) {
+    if (!(error instanceof OutputClosed)) throw error;
+  }
+}

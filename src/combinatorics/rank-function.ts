@@ -1,0 +1,39 @@
+/** The rank function of a permutation and what is read off it: diagram, essential set, dominant part. */
+import type { Cell } from "./cell.js";
+import { inverse, type Permutation } from "./permutation.js";
+
+/** `r_w(i,j) = #{a ≤ i : w(a) ≤ j}` as a table with rows and columns 0 … n. */
+export function rankTable(w: Permutation): readonly (readonly number[])[] {
+  const table = [new Array<number>(w.length + 1).fill(0)];
+  w.forEach((value, i) => {
+    table.push((table[i] as number[]).map((rank, j) => rank + (value <= j ? 1 : 0)));
+  });
+  return table;
+}
+
+/** The diagram D(w) = {(i,j) : w(i) > j, w⁻¹(j) > i}, row by row; it has ℓ(w) cells. */
+export function diagram(w: Permutation): readonly Cell[] {
+  const inverted = inverse(w);
+  return w.flatMap((value, i) =>
+    inverted.flatMap((place, j) =>
+      value > j + 1 && place > i + 1 ? [{ row: i + 1, column: j + 1 }] : [],
+    ),
+  );
+}
+
+/**
+ * The essential set: the cells (i,j) of D(w) with neither (i+1,j) nor (i,j+1) in D(w).
+ * @source Fulton, *Flags, Schubert polynomials, degeneracy loci, and determinantal formulas*, Duke Math. J. 65 (1992).
+ */
+export function essentialSet(w: Permutation): readonly Cell[] {
+  const cells = diagram(w);
+  const has = (row: number, column: number): boolean =>
+    cells.some((c) => c.row === row && c.column === column);
+  return cells.filter(({ row, column }) => !has(row + 1, column) && !has(row, column + 1));
+}
+
+/** The dominant part: the cells of D(w) where r_w = 0. */
+export function dominantPart(w: Permutation): readonly Cell[] {
+  const ranks = rankTable(w);
+  return diagram(w).filter(({ row, column }) => ranks[row]?.[column] === 0);
+}

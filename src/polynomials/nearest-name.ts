@@ -1,0 +1,27 @@
+/** The name a user may have meant: the nearest known one by edit distance (Levenshtein). */
+
+/** The nearest of the names, or undefined when none is within a third of the word's length. */
+export function nearestName(word: string, names: readonly string[]): string | undefined {
+  const allowed = Math.max(1, Math.floor(word.length / 3));
+  if (word.length > 40) return undefined;
+  let nearest: string | undefined;
+  let least = allowed + 1;
+  for (const name of names) {
+    const distance = editDistance(word.toLowerCase(), name.toLowerCase());
+    if (distance < least) [nearest, least] = [name, distance];
+  }
+  return nearest;
+}
+
+function editDistance(a: string, b: string): number {
+  let row = Array.from({ length: b.length + 1 }, (_, j) => j);
+  for (let i = 1; i <= a.length; i++) {
+    const next = [i];
+    for (let j = 1; j <= b.length; j++) {
+      const replaced = (row[j - 1] as number) + (a[i - 1] === b[j - 1] ? 0 : 1);
+      next.push(Math.min(replaced, (row[j] as number) + 1, (next[j - 1] as number) + 1));
+    }
+    row = next;
+  }
+  return row[b.length] as number;
+}
