@@ -7,6 +7,8 @@ import type { JobRequest } from "./request.js";
 export interface JobContext {
   /** Writes to standard output. */
   readonly write: (text: string) => void;
+  /** Writes one line to standard error. */
+  readonly warn: (message: string) => void;
   readonly budget: Budget;
 }
 

@@ -15,7 +15,14 @@ async function run(request: JobRequest): Promise<number> {
   const output = bufferedOutput();
   try {
     const { job } = (await import(`./jobs/${request.job}.js`)) as { job: Job };
-    const status = job(request, { write: output.write, budget: budgetOf(request) });
+    const status = job(request, {
+      write: output.write,
+      warn: (message) => {
+        output.flush();
+        writeAll(2, `flatlimit: ${message}\n`);
+      },
+      budget: budgetOf(request),
+    });
     output.flush();
     return status;
   } catch (error) {

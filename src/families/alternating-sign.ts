@@ -39,5 +39,9 @@ export const alternatingSignFamily: Family = {
 /* Partial sums are 0 or 1 and the whole sum is 1. */
 function alternates(line: readonly number[]): boolean {
   let sum = 0;
-  return line.every((entry) => [0, 1].includes((sum += entry))) && sum === 1;
+  for (const entry of line) {
+    sum += entry;
+    if (sum !== 0 && sum !== 1) return false;
+  }
+  return sum === 1;
 }

@@ -1,15 +1,27 @@
 /** The ideal of one generic matrix under a table of corner rank bounds, with its generating sets. */
 import { type CornerRanks, essentialBounds } from "../combinatorics/corner-ranks.js";
-import { ringOfMatrices, type VariableMatrix } from "../polynomials/polynomial-ring.js";
+import {
+  type PolynomialRing,
+  ringOfMatrices,
+  type VariableMatrix,
+} from "../polynomials/polynomial-ring.js";
 import type { Ideal } from "./ideal.js";
 import { rankMinors } from "./rank-ideal.js";
 import { definingSet } from "./schubert.js";
 
 /** The ideal of a table of corner rank bounds on a generic matrix in variables z. */
 export function cornerTableIdeal(name: string, table: CornerRanks): Ideal {
-  const { rows, columns } = table;
-  const ring = ringOfMatrices([{ name: "z", rows, columns }]);
-  const matrix = ring.matrices[0] as VariableMatrix;
+  const ring = ringOfMatrices([{ name: "z", rows: table.rows, columns: table.columns }]);
+  return cornerBoundsIdeal(name, ring, ring.matrices[0] as VariableMatrix, table);
+}
+
+/** The ideal of a table of corner rank bounds on one matrix of a ring. */
+export function cornerBoundsIdeal(
+  name: string,
+  ring: PolynomialRing,
+  matrix: VariableMatrix,
+  table: CornerRanks,
+): Ideal {
   const essential = essentialBounds(table);
   return {
     name,

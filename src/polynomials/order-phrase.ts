@@ -5,6 +5,7 @@
  * order  = { "weights" "(" integers ")" ("then" | "refined by") } base
  * base   = "graded revlex" | "graded lex" | "plain lex"
  *        | ["plain"] rules "from" corner "by" lines
+ *        | ["plain"] "cells" rule "(" variables ")" rule "(" variables ")" …
  *        | "dual" "from" corner "by" lines ["refined by" base]
  * rules  = rule | rule "," rule …      one for every line of the reading
  * ```
@@ -15,6 +16,8 @@ import { CORNERS, isCorner } from "./corner.js";
 import { gradedRevlex } from "./graded-revlex.js";
 import { nearestName } from "./nearest-name.js";
 import {
+  type CellRule,
+  cellRulesOrder,
   cornerOrder,
   dualOrder,
   lineRulesOrder,
@@ -23,7 +26,7 @@ import {
   type Rule,
   weightOrder,
 } from "./orders.js";
-import type { PolynomialRing } from "./polynomial-ring.js";
+import { type PolynomialRing, type VariableIndex, variableNamed } from "./polynomial-ring.js";
 import { type TermOrder, variableBelowOne } from "./term-order.js";
 
 /** What orders look like, for messages. */
@@ -31,7 +34,7 @@ export const ORDER_EXAMPLES =
   '"lex from nw by rows", "revlex from se by columns", "graded revlex" or "plain lex"';
 
 const LONGEST_PHRASE = 100_000;
-const KEYWORDS = ["lex", "revlex", "dual", "graded", "plain", "weights"];
+const KEYWORDS = ["lex", "revlex", "dual", "graded", "plain", "weights", "cells"];
 
 interface Word {
   readonly text: string;
@@ -144,6 +147,7 @@ class PhraseReader {
       this.#next++;
       return listedLex(this.#ring, false);
     }
+    if (this.#takes("cells")) return this.#cells(start, !plain);
     if (!plain && this.#takes("dual")) return this.#dual(start);
     const rules = this.#rules();
     const path = this.#path();
@@ -164,22 +168,43 @@ class PhraseReader {
     return this.#built(start, () => dualOrder(this.#ring, path, refinement));
   }
 
+  #cells(start: number, degreeFirst: boolean): TermOrder {
+    const cells: CellRule[] = [];
+    do {
+      const rule = this.#rule('"cells lex (z11,z12) revlex (z21,z22)"');
+      this.#must("(", "variables in parentheses, such as (z11,z12)");
+      const variables: VariableIndex[] = [];
+      do {
+        const { text, offset } = this.#word("a variable");
+        const index = variableNamed(this.#ring, text);
+        if (index === undefined) {
+          throw new Fault(offset, `unknown variable ${quote(text)}`, "a variable of the ring");
+        }
+        variables.push(index);
+      } while (this.#takes(","));
+      this.#must(")", "a , or a )");
+      cells.push({ rule, variables });
+    } while (this.#peek() === "lex" || this.#peek() === "revlex");
+    return this.#built(start, () => cellRulesOrder(this.#ring, cells, degreeFirst));
+  }
+
   #rules(): Rule[] {
     const rules: Rule[] = [];
-    do {
-      const { text, offset } = this.#word(ORDER_EXAMPLES);
-      if (text !== "lex" && text !== "revlex") {
-        const near = nearestName(text, KEYWORDS);
-        const hint = near === undefined ? "" : `${near}, perhaps; `;
-        throw new Fault(
-          offset,
-          `unknown rule ${quote(text)}`,
-          `${hint}an order such as ${ORDER_EXAMPLES}`,
-        );
-      }
-      rules.push(text);
-    } while (this.#takes(","));
+    do rules.push(this.#rule(ORDER_EXAMPLES));
+    while (this.#takes(","));
     return rules;
+  }
+
+  #rule(expected: string): Rule {
+    const { text, offset } = this.#word(expected);
+    if (text === "lex" || text === "revlex") return text;
+    const near = nearestName(text, KEYWORDS);
+    const hint = near === undefined ? "" : `${near}, perhaps; `;
+    throw new Fault(
+      offset,
+      `unknown rule ${quote(text)}`,
+      `${hint}an order such as ${ORDER_EXAMPLES}`,
+    );
   }
 
   #path(): ReadingPath {

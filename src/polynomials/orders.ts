@@ -92,6 +92,37 @@ export function lineRulesOrder(
   return totalOrder(ring, `${rules.join(",")} ${pathPhrase(path)}`, comparisons, true);
 }
 
+/** Some variables in the order in which they are compared, all by one rule. */
+export interface CellRule {
+  readonly rule: Rule;
+  readonly variables: readonly VariableIndex[];
+}
+
+/**
+ * A choice for every single variable: `cells lex (z11,z12) revlex (z21,z22)`.
+ * @throws RangeError unless every variable of the ring stands in the list just once.
+ */
+export function cellRulesOrder(
+  ring: PolynomialRing,
+  cells: readonly CellRule[],
+  degreeFirst = true,
+): TermOrder {
+  const listed = cells.flatMap(({ variables }) => variables);
+  const missing = ring.variables.find((_, v) => !listed.includes(v as VariableIndex));
+  if (missing !== undefined) throw new RangeError(`expected every variable, ${missing} too`);
+  if (listed.length > ring.variables.length) {
+    throw new RangeError("expected every variable just once");
+  }
+  const words = cells.map(
+    ({ rule, variables }) => `${rule} (${variables.map((v) => ring.variables[v]).join(",")})`,
+  );
+  const comparisons = cells.flatMap(({ rule, variables }) =>
+    variables.map((v) => singleVariableComparison(v, rule === "lex" ? 1 : -1)),
+  );
+  const phrase = `${degreeFirst ? "" : "plain "}cells ${words.join(" ")}`;
+  return totalOrder(ring, phrase, comparisons, degreeFirst);
+}
+
 /** A lex order on the listed variables, the first the largest: `graded lex`, or `plain lex`. */
 export function listedLex(ring: PolynomialRing, degreeFirst: boolean): TermOrder {
   const comparisons = ring.variables.map((_, v) => singleVariableComparison(v as VariableIndex, 1));
