@@ -67,5 +67,6 @@ export type { TermOrder } from "./polynomials/term-order.js";
 export { type Problem, readProblem } from "./problems/problem.js";
 export { type ProblemDocument, problemDocument } from "./problems/problem-document.js";
 export { printFault } from "./report/fault-text.js";
+export { drawTiling } from "./tilings/drawing.js";
 export type { Tiling, TilingKind } from "./tilings/tiling.js";
 export { type TilingFamily, tilingKinds } from "./tilings/tiling-kinds.js";
