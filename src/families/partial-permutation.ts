@@ -29,6 +29,7 @@ export const partialPermutationFamily: Family = {
     const columns = width === undefined ? Math.max(...dots, 1) : Number(width);
     const used = dots.filter((d) => d > 0);
     if (new Set(used).size < used.length) return refuse("two dots in one column");
+    if (columns === 0) return refuse("it has no columns");
     if (used.some((d) => d > columns)) return refuse("a dot outside the columns");
     if (dots.length > 100 || columns > 100) return refuse("more than 100 rows or columns");
     const matrix = dots.map((dot) =>
