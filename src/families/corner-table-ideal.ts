@@ -7,7 +7,6 @@ import {
 } from "../polynomials/polynomial-ring.js";
 import type { Ideal } from "./ideal.js";
 import { rankMinors } from "./rank-ideal.js";
-import { definingSet } from "./schubert.js";
 
 /** The ideal of a table of corner rank bounds on a generic matrix in variables z. */
 export function cornerTableIdeal(name: string, table: CornerRanks): Ideal {
@@ -22,7 +21,6 @@ export function cornerBoundsIdeal(
   matrix: VariableMatrix,
   table: CornerRanks,
 ): Ideal {
-  const essential = essentialBounds(table);
   return {
     name,
     ring,
@@ -30,9 +28,13 @@ export function cornerBoundsIdeal(
       {
         kind: "fulton",
         description: "the minors of the corners whose bounds the others do not imply",
-        polynomials: () => rankMinors(ring, matrix, essential),
+        polynomials: () => rankMinors(ring, matrix, essentialBounds(table)),
       },
-      definingSet(ring, matrix, table),
+      {
+        kind: "defining",
+        description: "the minors of all corners",
+        polynomials: () => rankMinors(ring, matrix, table),
+      },
     ],
     defaultOrder: "revlex from nw by rows",
   };

@@ -14,12 +14,12 @@ import {
 import { dominantPart } from "../combinatorics/rank-function.js";
 import { read } from "../outcomes/input-fault.js";
 import { type Polynomial, variable } from "../polynomials/polynomial.js";
-import {
-  type PolynomialRing,
-  ringOfMatrices,
-  type VariableIndex,
-  type VariableMatrix,
+import type {
+  PolynomialRing,
+  VariableIndex,
+  VariableMatrix,
 } from "../polynomials/polynomial-ring.js";
+import { cornerTableIdeal } from "./corner-table-ideal.js";
 import type { Family, GeneratingSet, Ideal } from "./ideal.js";
 import { rankMinors } from "./rank-ideal.js";
 
@@ -37,43 +37,16 @@ export const schubertFamily: Family = {
 
 /** The ideal of the matrix Schubert variety of w. */
 export function schubertIdeal(w: Permutation): Ideal {
-  const n = w.length;
-  const ring = ringOfMatrices([{ name: "z", rows: n, columns: n }]);
-  const matrix = ring.matrices[0] as VariableMatrix;
   const corners = cornerSums(w.map((value) => w.map((_, j) => (value === j + 1 ? 1 : 0))));
-  const essential = essentialBounds(corners);
-  return {
-    name: `schubert:${printPermutation(w)}`,
-    ring,
-    generatingSets: [
-      {
-        kind: "fulton",
-        description: "the minors of the essential corners",
-        polynomials: () => rankMinors(ring, matrix, essential),
-      },
-      {
-        kind: "cdg",
-        description: "the variables of the dominant part, and the Fulton minors without them",
-        polynomials: () => cdgGenerators(ring, matrix, essential, dominantVariables(w, matrix)),
-      },
-      definingSet(ring, matrix, corners),
-    ],
-    defaultOrder: "revlex from nw by rows",
-    permutation: w,
+  const byCorners = cornerTableIdeal(`schubert:${printPermutation(w)}`, corners);
+  const [fulton, ...others] = byCorners.generatingSets;
+  const matrix = byCorners.ring.matrices[0] as VariableMatrix;
+  const cdg: GeneratingSet = {
+    kind: "cdg",
+    description: "the variables of the dominant part, and the Fulton minors without them",
+    polynomials: () => cdgGenerators(byCorners.ring, matrix, corners, dominantVariables(w, matrix)),
   };
-}
-
-/** The minors of all corner submatrices of a table. */
-export function definingSet(
-  ring: PolynomialRing,
-  matrix: VariableMatrix,
-  corners: CornerRanks,
-): GeneratingSet {
-  return {
-    kind: "defining",
-    description: "the minors of all corners",
-    polynomials: () => rankMinors(ring, matrix, corners),
-  };
+  return { ...byCorners, generatingSets: [fulton, cdg, ...others], permutation: w };
 }
 
 function dominantVariables(w: Permutation, matrix: VariableMatrix): VariableIndex[] {
@@ -85,9 +58,9 @@ function dominantVariables(w: Permutation, matrix: VariableMatrix): VariableInde
 function cdgGenerators(
   ring: PolynomialRing,
   matrix: VariableMatrix,
-  essential: CornerRanks,
+  corners: CornerRanks,
   dominant: readonly VariableIndex[],
 ): Polynomial[] {
-  const minors = rankMinors(ring, matrix, essential, new Set(dominant));
+  const minors = rankMinors(ring, matrix, essentialBounds(corners), new Set(dominant));
   return [...dominant.map((v) => variable(ring, v)), ...minors];
 }
