@@ -66,11 +66,12 @@ export function equalExponents(a: Exponents, b: Exponents): boolean {
  * exponent at the first variable that differs. Negative when `a` comes before `b`.
  */
 export function compareCanonically(a: Exponents, b: Exponents): number {
-  const byDegree = totalDegree(b) - totalDegree(a);
-  if (byDegree !== 0) return byDegree;
+  let byDegree = 0;
+  let byExponent = 0;
   for (let i = 0; i < a.length; i++) {
-    const byExponent = (b[i] as number) - (a[i] as number);
-    if (byExponent !== 0) return byExponent;
+    const difference = (b[i] as number) - (a[i] as number);
+    byDegree += difference;
+    if (byExponent === 0) byExponent = difference;
   }
-  return 0;
+  return byDegree === 0 ? byExponent : byDegree;
 }

@@ -2,272 +2,234 @@
  * Orders as phrases, read and refused with a place. The phrases are those of `TermOrder.phrase`:
  *
  * ```text
- * order  = { "weights" "(" integers ")" ("then" | "refined by") } base
- * base   = "graded revlex" | "graded lex" | "plain lex"
- *        | ["plain"] rules "from" corner "by" lines
- *        | ["plain"] "cells" rule "(" variables ")" rule "(" variables ")" …
- *        | "dual" "from" corner "by" lines ["refined by" base]
- * rules  = rule | rule "," rule …      one for every line of the reading
+ * order      = { "weights" "(" integers ")" ("then" | "refined by") } base
+ * base       = "graded revlex" | "graded lex" | "plain lex"
+ *            | ["plain"] rule path
+ *            | rule "," rule … path                 one rule for every line of the reading
+ *            | ["plain"] "cells" rule "(" variables ")" rule "(" variables ")" …
+ *            | "dual" path ["refined by" base]
+ * path       = "from" corner "by" ("rows" | "columns")
  * ```
- * `refined by` instead of `then` makes the order partial.
+ * `refined by` instead of `then` makes an order by weights partial. A dual order is partial in any case,
+ * so that `dual … then …` is read as `dual … refined by …`.
  */
-import { faulty, placeAt, quote, type Reading, read } from "../outcomes/input-fault.js";
+import { quote, type Reading } from "../outcomes/input-fault.js";
 import { CORNERS, isCorner } from "./corner.js";
 import { gradedRevlex } from "./graded-revlex.js";
 import { nearestName } from "./nearest-name.js";
 import {
   type CellRule,
-  cellRulesOrder,
-  cornerOrder,
+  cellRulesPiece,
+  cornerPiece,
   dualOrder,
   lineRulesOrder,
   listedLex,
-  type ReadingPath,
+  MAX_WEIGHT,
   type Rule,
-  weightOrder,
+  weightPiece,
 } from "./orders.js";
+import { PhraseWords } from "./phrase-words.js";
 import { type PolynomialRing, type VariableIndex, variableNamed } from "./polynomial-ring.js";
+import { type ReadingPath, readAllLines } from "./reading-path.js";
 import { type TermOrder, variableBelowOne } from "./term-order.js";
+import { readingOf, TextFault } from "./text-fault.js";
 
 /** What orders look like, for messages. */
 export const ORDER_EXAMPLES =
   '"lex from nw by rows", "revlex from se by columns", "graded revlex" or "plain lex"';
 
-const LONGEST_PHRASE = 100_000;
+const LISTED_ORDERS = '"graded revlex", "graded lex" or "plain lex"';
 const KEYWORDS = ["lex", "revlex", "dual", "graded", "plain", "weights", "cells"];
 
-interface Word {
-  readonly text: string;
-  readonly offset: number;
-}
-
-class Fault extends Error {
-  readonly offset: number;
-  readonly expected: string;
-  constructor(offset: number, message: string, expected: string) {
-    super(message);
-    this.offset = offset;
-    this.expected = expected;
-  }
-}
-
-/** Reads the phrase of an order on the ring. */
+/**
+ * Reads the phrase of an order on the ring. Never throws: what is no term order comes back as a fault.
+ * @example readOrder("revlex from nw by rows", ring)
+ */
 export function readOrder(phrase: string, ring: PolynomialRing): Reading<TermOrder> {
-  try {
-    const order = new PhraseReader(phrase, ring).whole();
+  return readingOf(phrase, {}, () => {
+    const order = new OrderReader(phrase, ring).whole();
     const below = variableBelowOne(order);
-    if (below !== undefined) {
-      throw new Fault(
-        0,
-        `${quote(phrase)} is not a term order: ${ring.variables[below]} is smaller than 1`,
-        "positive weights first, or the degree first",
-      );
-    }
-    return read(order);
-  } catch (error) {
-    if (!(error instanceof Fault)) throw error;
-    const { message, expected, offset } = error;
-    const excerpt = phrase.split("\n")[placeAt(phrase, offset).line - 1] ?? "";
-    return faulty({ message, expected, place: placeAt(phrase, offset), excerpt });
-  }
+    if (below === undefined) return order;
+    throw new TextFault(
+      0,
+      `${quote(phrase)} is not a term order: ${ring.variables[below]} is below 1`,
+      'positive weights first, or the degree first (without "plain")',
+    );
+  });
 }
 
-class PhraseReader {
-  readonly #words: readonly Word[];
+class OrderReader {
+  readonly #words: PhraseWords;
   readonly #ring: PolynomialRing;
-  readonly #length: number;
-  #next = 0;
 
   constructor(phrase: string, ring: PolynomialRing) {
-    if (phrase.length > LONGEST_PHRASE) {
-      throw new Fault(0, "the order is too long", `at most ${LONGEST_PHRASE} characters`);
-    }
-    this.#words = [...phrase.matchAll(/[(),]|[^\s(),]+/gu)].map((m) => ({
-      text: m[0],
-      offset: m.index,
-    }));
+    this.#words = new PhraseWords(phrase);
     this.#ring = ring;
-    this.#length = phrase.length;
   }
 
   whole(): TermOrder {
-    if (this.#words.length === 0) throw new Fault(0, "the order is empty", ORDER_EXAMPLES);
+    const words = this.#words;
+    if (words.peek() === undefined) throw new TextFault(0, "the order is empty", ORDER_EXAMPLES);
     const order = this.#order();
-    const rest = this.#words[this.#next];
-    if (rest !== undefined) {
-      throw new Fault(
-        rest.offset,
-        `${quote(rest.text)} cannot follow ${quote(order.phrase)}`,
-        "nothing more",
-      );
-    }
-    return order;
+    const rest = words.peek();
+    if (rest === undefined) return order;
+    const message = `${quote(rest)} cannot follow ${quote(order.phrase)}`;
+    throw new TextFault(words.offset(), message, "nothing more");
   }
 
   #order(): TermOrder {
     const vectors: number[][] = [];
-    const start = this.#offset();
-    while (this.#takes("weights")) {
+    while (this.#words.takes("weights")) {
       vectors.push(this.#vector());
-      if (this.#takes("then")) continue;
-      if (this.#takes("refined")) {
-        this.#must("by", '"refined by"');
-        return this.#built(start, () => weightOrder(this.#ring, vectors, this.#base(), "partial"));
-      }
-      throw this.#unexpected('"then" or "refined by" and another order');
+      if (this.#words.takes("then")) continue;
+      this.#words.must("refined", '"then" or "refined by" and another order');
+      this.#words.must("by", '"refined by" and another order');
+      return weightPiece(this.#ring, vectors, this.#base(), "partial");
     }
     const base = this.#base();
-    if (vectors.length === 0) return base;
-    return this.#built(start, () => weightOrder(this.#ring, vectors, base, "total"));
+    return vectors.length === 0 ? base : weightPiece(this.#ring, vectors, base, "total");
   }
 
   #vector(): number[] {
-    this.#must("(", "weights in parentheses, such as (1,0,2)");
+    const { variables } = this.#ring;
+    const wanted = `${variables.length} weights, one for each variable`;
+    this.#words.must("(", "weights in parentheses, such as (1,0,2)");
     const weights: number[] = [];
     do {
-      const { text, offset } = this.#word("a weight");
+      const { text, offset } = this.#words.word("a weight");
+      const weight = Number(text);
       if (!/^[+-]?\d+$/.test(text)) {
-        throw new Fault(offset, `${quote(text)} is not a weight`, "a whole number");
+        throw new TextFault(offset, `${quote(text)} is not a weight`, "a whole number");
       }
-      weights.push(Number(text));
-    } while (this.#takes(","));
-    this.#must(")", "a , or a )");
-    return weights;
+      if (Math.abs(weight) > MAX_WEIGHT) {
+        const message = `the weight ${quote(text)} is too large`;
+        throw new TextFault(offset, message, `a whole number up to ${MAX_WEIGHT}`);
+      }
+      if (weights.length === variables.length) {
+        throw new TextFault(offset, "there are more weights than variables", wanted);
+      }
+      weights.push(weight);
+    } while (this.#words.takes(","));
+    const end = this.#words.offset();
+    this.#words.must(")", "a , or a )");
+    if (weights.length === variables.length) return weights;
+    throw new TextFault(end, "there are fewer weights than variables", wanted);
   }
 
   #base(): TermOrder {
-    const start = this.#offset();
-    if (this.#takes("graded")) {
-      if (this.#takes("revlex")) return gradedRevlex(this.#ring);
-      if (this.#takes("lex")) return listedLex(this.#ring, true);
-      throw this.#unexpected('"graded lex" or "graded revlex"');
+    const words = this.#words;
+    if (words.takes("graded")) {
+      if (words.takes("revlex")) return gradedRevlex(this.#ring);
+      words.must("lex", '"graded lex" or "graded revlex"');
+      return listedLex(this.#ring, true);
     }
-    const plain = this.#takes("plain");
-    if (plain && this.#peek() === "lex" && this.#peek(1) !== "from") {
-      this.#next++;
+    const start = words.offset();
+    const plain = words.takes("plain");
+    if (plain && words.peek() === "lex" && words.peek(1) !== "from") {
+      words.takes("lex");
       return listedLex(this.#ring, false);
     }
-    if (this.#takes("cells")) return this.#cells(start, !plain);
-    if (!plain && this.#takes("dual")) return this.#dual(start);
-    const rules = this.#rules();
+    if (words.takes("cells")) return this.#cells(!plain);
+    if (!plain && words.takes("dual")) return this.#dual(start);
+    return this.#byRules(start, plain);
+  }
+
+  #byRules(start: number, plain: boolean): TermOrder {
+    const rules: Rule[] = [];
+    do rules.push(this.#rule());
+    while (this.#words.takes(","));
+    if (this.#ring.matrices.length === 0) {
+      throw new TextFault(start, "there is no matrix to read from a corner", LISTED_ORDERS);
+    }
     const path = this.#path();
     const [rule] = rules;
-    if (rules.length === 1 && rule !== undefined) {
-      return this.#built(start, () => cornerOrder(this.#ring, rule, path, !plain));
+    if (rule !== undefined && rules.length === 1) {
+      return cornerPiece(this.#ring, rule, path, !plain);
     }
-    if (plain)
-      throw new Fault(start, '"plain" goes with one rule only', '"plain lex from nw by rows"');
-    return this.#built(start, () => lineRulesOrder(this.#ring, rules, path));
+    if (plain) {
+      throw new TextFault(start, '"plain" goes with one rule only', '"plain lex from nw by rows"');
+    }
+    const lines = readAllLines(this.#ring, path).length;
+    if (rules.length !== lines) {
+      const message = `there are ${rules.length} rules for ${lines} ${path.lines}`;
+      throw new TextFault(start, message, "one rule for each, or one for all");
+    }
+    return lineRulesOrder(this.#ring, rules, path);
   }
 
   #dual(start: number): TermOrder {
+    if (this.#ring.pair === undefined) {
+      throw new TextFault(start, "there are no paired matrices to compare", ORDER_EXAMPLES);
+    }
     const path = this.#path();
-    if (!this.#takes("refined")) return this.#built(start, () => dualOrder(this.#ring, path));
-    this.#must("by", '"refined by" and an order');
-    const refinement = this.#base();
-    return this.#built(start, () => dualOrder(this.#ring, path, refinement));
+    if (this.#words.takes("refined")) this.#words.must("by", '"refined by" and an order');
+    else if (!this.#words.takes("then")) return dualOrder(this.#ring, path);
+    return dualOrder(this.#ring, path, this.#base());
   }
 
-  #cells(start: number, degreeFirst: boolean): TermOrder {
+  #cells(degreeFirst: boolean): TermOrder {
+    const words = this.#words;
     const cells: CellRule[] = [];
+    const seen = new Set<VariableIndex>();
     do {
-      const rule = this.#rule('"cells lex (z11,z12) revlex (z21,z22)"');
-      this.#must("(", "variables in parentheses, such as (z11,z12)");
+      const rule = this.#rule();
       const variables: VariableIndex[] = [];
-      do {
-        const { text, offset } = this.#word("a variable");
-        const index = variableNamed(this.#ring, text);
-        if (index === undefined) {
-          throw new Fault(offset, `unknown variable ${quote(text)}`, "a variable of the ring");
-        }
-        variables.push(index);
-      } while (this.#takes(","));
-      this.#must(")", "a , or a )");
+      words.must("(", "variables in parentheses, such as (z11,z12)");
+      do variables.push(this.#newVariable(seen));
+      while (words.takes(","));
+      words.must(")", "a , or a )");
       cells.push({ rule, variables });
-    } while (this.#peek() === "lex" || this.#peek() === "revlex");
-    return this.#built(start, () => cellRulesOrder(this.#ring, cells, degreeFirst));
+    } while (words.peek() === "lex" || words.peek() === "revlex");
+    const missing = this.#ring.variables.find((_, v) => !seen.has(v as VariableIndex));
+    if (missing === undefined) return cellRulesPiece(this.#ring, cells, degreeFirst);
+    throw new TextFault(words.offset(), `there is no rule for ${missing}`, "every variable once");
   }
 
-  #rules(): Rule[] {
-    const rules: Rule[] = [];
-    do rules.push(this.#rule(ORDER_EXAMPLES));
-    while (this.#takes(","));
-    return rules;
+  #newVariable(seen: Set<VariableIndex>): VariableIndex {
+    const { text, offset } = this.#words.word("a variable");
+    const index = variableNamed(this.#ring, text);
+    if (index === undefined) {
+      const near = nearestName(text, this.#ring.variables);
+      const expected = near === undefined ? "a variable of the ring" : `${near}, perhaps`;
+      throw new TextFault(offset, `unknown variable ${quote(text)}`, expected);
+    }
+    if (seen.has(index)) {
+      throw new TextFault(offset, `a second rule for ${text}`, "every variable once");
+    }
+    seen.add(index);
+    return index;
   }
 
-  #rule(expected: string): Rule {
-    const { text, offset } = this.#word(expected);
-    if (text === "lex" || text === "revlex") return text;
+  #rule(): Rule {
+    const expected = `an order such as ${ORDER_EXAMPLES}`;
+    const text = this.#words.peek();
+    if (text === undefined || KEYWORDS.includes(text)) {
+      if (this.#words.takes("lex")) return "lex";
+      if (this.#words.takes("revlex")) return "revlex";
+      throw this.#words.unexpected(expected);
+    }
     const near = nearestName(text, KEYWORDS);
-    const hint = near === undefined ? "" : `${near}, perhaps; `;
-    throw new Fault(
-      offset,
+    throw new TextFault(
+      this.#words.offset(),
       `unknown rule ${quote(text)}`,
-      `${hint}an order such as ${ORDER_EXAMPLES}`,
+      near === undefined ? expected : `${near}, perhaps; ${expected}`,
     );
   }
 
   #path(): ReadingPath {
-    this.#must("from", '"from" and a corner: nw, ne, sw or se');
-    const corner = this.#word("a corner: nw, ne, sw or se");
+    const words = this.#words;
+    words.must("from", '"from" and a corner: nw, ne, sw or se');
+    const corner = words.word("a corner: nw, ne, sw or se");
     if (!isCorner(corner.text)) {
-      throw new Fault(
-        corner.offset,
-        `unknown corner ${quote(corner.text)}`,
-        `one of ${CORNERS.join(", ")}`,
-      );
+      const message = `unknown corner ${quote(corner.text)}`;
+      throw new TextFault(corner.offset, message, `one of ${CORNERS.join(", ")}`);
     }
-    this.#must("by", '"by rows" or "by columns"');
-    const lines = this.#word("rows or columns");
+    words.must("by", '"by rows" or "by columns"');
+    const lines = words.word("rows or columns");
     if (lines.text !== "rows" && lines.text !== "columns") {
-      throw new Fault(lines.offset, `unknown lines ${quote(lines.text)}`, "rows or columns");
+      const message = `unknown lines ${quote(lines.text)}`;
+      throw new TextFault(lines.offset, message, "rows or columns");
     }
     return { corner: corner.text, lines: lines.text };
-  }
-
-  /* Builders refuse what does not fit the ring; their words are turned into a fault with a place. */
-  #built(start: number, build: () => TermOrder): TermOrder {
-    try {
-      return build();
-    } catch (error) {
-      if (!(error instanceof RangeError)) throw error;
-      const [, expected = error.message, got] =
-        /^expected (.*?)(?:, got (.*))?$/.exec(error.message) ?? [];
-      throw new Fault(
-        start,
-        got === undefined ? "the order does not fit the variables" : `got ${got}`,
-        expected,
-      );
-    }
-  }
-
-  #peek(ahead = 0): string | undefined {
-    return this.#words[this.#next + ahead]?.text;
-  }
-
-  #offset(): number {
-    return this.#words[this.#next]?.offset ?? this.#length;
-  }
-
-  #takes(text: string): boolean {
-    const found = this.#peek() === text;
-    if (found) this.#next++;
-    return found;
-  }
-
-  #word(expected: string): Word {
-    const word = this.#words[this.#next++];
-    if (word === undefined) throw new Fault(this.#length, "the order ends too early", expected);
-    return word;
-  }
-
-  #must(text: string, expected: string): void {
-    if (!this.#takes(text)) throw this.#unexpected(expected);
-  }
-
-  #unexpected(expected: string): Fault {
-    const word = this.#words[this.#next];
-    if (word === undefined) return new Fault(this.#length, "the order ends too early", expected);
-    return new Fault(word.offset, `${quote(word.text)} cannot stand here`, expected);
   }
 }

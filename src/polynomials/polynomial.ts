@@ -104,14 +104,21 @@ export function subtract(f: Polynomial, g: Polynomial): Polynomial {
   return add(f, negate(g));
 }
 
-/** f · g. @throws ExponentOverflow when an exponent passes 65,535. */
+/**
+ * f · g. @throws ExponentOverflow when an exponent passes 65,535.
+ * Cost: the products of terms are laid out as one sorted run for each term of the shorter factor, and
+ * the sort merges runs: N·log(runs) for N pairs of terms.
+ */
 export function multiply(f: Polynomial, g: Polynomial): Polynomial {
+  const [short, long] = f.monomials.length < g.monomials.length ? [f, g] : [g, f];
   const terms: Term[] = [];
-  for (let i = 0; i < f.monomials.length; i++) {
-    for (let j = 0; j < g.monomials.length; j++) {
+  for (let i = 0; i < short.monomials.length; i++) {
+    const monomial = short.monomials[i] as Exponents;
+    const numerator = short.numerators[i] as bigint;
+    for (let j = 0; j < long.monomials.length; j++) {
       terms.push({
-        monomial: multiplyExponents(f.monomials[i] as Exponents, g.monomials[j] as Exponents),
-        numerator: (f.numerators[i] as bigint) * (g.numerators[j] as bigint),
+        monomial: multiplyExponents(monomial, long.monomials[j] as Exponents),
+        numerator: numerator * (long.numerators[j] as bigint),
       });
     }
   }
