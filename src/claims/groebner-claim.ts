@@ -1,9 +1,15 @@
 /** The claim that a generating set is a Gröbner basis of its ideal in an order. */
 import { rationalBasis } from "../groebner/rational-basis.js";
 import { type VerificationWitness, verifyGenerators } from "../groebner/verification.js";
-import { type Budget, startBudget, type Undecided } from "../outcomes/budget.js";
+import {
+  type Budget,
+  isList,
+  startBudget,
+  type Undecided,
+  withinBudget,
+} from "../outcomes/budget.js";
 import { totalDegree } from "../polynomials/exponents.js";
-import { isHomogeneous } from "../polynomials/polynomial.js";
+import { isHomogeneous, type Polynomial } from "../polynomials/polynomial.js";
 import type { Question } from "./question.js";
 
 /** Size and largest degree of the reduced Gröbner basis of the ideal. */
@@ -15,7 +21,8 @@ export interface BasisSize {
 /** The claim with its verdict, evidence and witness. */
 export interface GroebnerClaim extends Question {
   readonly kind: "groebner-claim";
-  readonly generatorCount: number;
+  /** The generators themselves; witnesses point into this list. */
+  readonly polynomials: readonly Polynomial[];
   readonly evidence: "proved";
   readonly pairsReduced: number;
   readonly verdict: "holds" | "fails";
@@ -34,14 +41,15 @@ export function decideGroebner(
   budget: Budget,
   basisSeconds = 0,
 ): GroebnerClaim | Undecided {
-  const polynomials = question.generators.polynomials();
+  const polynomials = withinBudget(() => question.generators.polynomials(budget));
+  if (!isList(polynomials)) return polynomials;
   const verification = verifyGenerators(polynomials, question.order, budget);
   if (verification.kind === "undecided") return verification;
   const { verdict, pairsReduced } = verification;
   const claim = {
     ...question,
     kind: "groebner-claim",
-    generatorCount: polynomials.length,
+    polynomials,
     evidence: "proved",
     pairsReduced,
     verdict,

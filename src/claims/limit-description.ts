@@ -2,7 +2,7 @@
 import { codimensionOf, degreeOf, hilbertNumerator } from "../components/hilbert-numerator.js";
 import { type PrimaryComponent, primaryComponents } from "../components/primary-components.js";
 import { type FlatLimit, flatLimit } from "../limits/flat-limit.js";
-import { type Budget, type Undecided, withinBudget } from "../outcomes/budget.js";
+import { type Budget, isList, type Undecided, withinBudget } from "../outcomes/budget.js";
 import { isSquarefree } from "../polynomials/monomial-ideal.js";
 import type { Question } from "./question.js";
 
@@ -22,7 +22,9 @@ export interface LimitDescription extends Question {
 
 /** Computes and describes the limit. @returns `Undecided` when even the limit was not reached. */
 export function describeLimit(question: Question, budget: Budget): LimitDescription | Undecided {
-  const limit = flatLimit(question.generators.polynomials(), question.order, budget);
+  const polynomials = withinBudget(() => question.generators.polynomials(budget));
+  if (!isList(polynomials)) return polynomials;
+  const limit = flatLimit(polynomials, question.order, budget);
   if (limit.kind === "undecided") return limit;
   const { leadingIdeal, monomial } = limit;
   return withinBudget((): LimitDescription => {
@@ -40,11 +42,6 @@ export function describeLimit(question: Question, budget: Budget): LimitDescript
       unmixed: isList(components) ? components.every((c) => !c.embedded) : null,
     };
   });
-}
-
-/** Was the decomposition reached? */
-export function isList<T>(found: readonly T[] | Undecided): found is readonly T[] {
-  return Array.isArray(found);
 }
 
 function notMonomial(): Undecided {

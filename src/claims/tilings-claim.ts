@@ -1,12 +1,12 @@
 /** The claim that the components of a limit are the tilings of a permutation, with multiplicities. */
 import type { Permutation } from "../combinatorics/permutation.js";
-import { type Budget, type Undecided, withinBudget } from "../outcomes/budget.js";
+import { type Budget, isList, type Undecided, withinBudget } from "../outcomes/budget.js";
 import { minorTerms } from "../polynomials/orders.js";
 import type { PolynomialRing, VariableIndex } from "../polynomials/polynomial-ring.js";
 import type { TermOrder } from "../polynomials/term-order.js";
 import type { Tiling, TilingKind } from "../tilings/tiling.js";
 import { tilingKinds } from "../tilings/tiling-kinds.js";
-import { describeLimit, isList, type LimitDescription } from "./limit-description.js";
+import { describeLimit, type LimitDescription } from "./limit-description.js";
 import type { Question } from "./question.js";
 import { matchSubspaces, type SubspaceMatching } from "./subspace-matching.js";
 

@@ -28,12 +28,13 @@ export function cornerBoundsIdeal(
       {
         kind: "fulton",
         description: "the minors of the corners whose bounds the others do not imply",
-        polynomials: () => rankMinors(ring, matrix, essentialBounds(table)),
+        polynomials: (budget) =>
+          rankMinors(ring, matrix, essentialBounds(table), undefined, budget),
       },
       {
         kind: "defining",
         description: "the minors of all corners",
-        polynomials: () => rankMinors(ring, matrix, table),
+        polynomials: (budget) => rankMinors(ring, matrix, table, undefined, budget),
       },
     ],
     defaultOrder: "revlex from nw by rows",

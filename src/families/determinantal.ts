@@ -37,7 +37,14 @@ export function determinantalIdeal(m: number, n: number, r: number): Ideal {
       {
         kind: "minors",
         description: "all minors of one more than the rank",
-        polynomials: () => rankMinors(ring, matrix, { rows: m, columns: n, corner: "nw", bounds }),
+        polynomials: (budget) =>
+          rankMinors(
+            ring,
+            matrix,
+            { rows: m, columns: n, corner: "nw", bounds },
+            undefined,
+            budget,
+          ),
       },
     ],
     defaultOrder: "lex from nw by rows",

@@ -3,6 +3,7 @@
  * order, and, for the families, the permutation whose tilings the limit is compared with.
  */
 import type { Permutation } from "../combinatorics/permutation.js";
+import type { Budget } from "../outcomes/budget.js";
 import type { Reading } from "../outcomes/input-fault.js";
 import type { Polynomial } from "../polynomials/polynomial.js";
 import type { PolynomialRing } from "../polynomials/polynomial-ring.js";
@@ -13,8 +14,11 @@ export interface GeneratingSet {
   readonly kind: string;
   /** One line for `--help` and reports. */
   readonly description: string;
-  /** The generators: non-zero, distinct up to order; made on demand, since large families have many. */
-  polynomials(): readonly Polynomial[];
+  /**
+   * The generators: non-zero and distinct; made on demand, since large families have many.
+   * @throws LimitReached
+   */
+  polynomials(budget?: Budget): readonly Polynomial[];
 }
 
 /** An ideal that can be verified, degenerated and matched. */

@@ -2,6 +2,7 @@
  * Minors of matrices of variables, built term by term in normal form: depth-first over the rows, one
  * permutation a term, entries that vanish skipped. Cost: the number of terms times their degree.
  */
+import { type Budget, unlimited } from "../outcomes/budget.js";
 import { type Polynomial, polynomial, type Term } from "../polynomials/polynomial.js";
 import type {
   PolynomialRing,
@@ -13,6 +14,7 @@ import type {
  * The minor with the given rows and columns (from 0, as many of each), its entries in `vanishing` set
  * to 0.
  * @throws RangeError when rows and columns differ in number.
+ * @throws LimitReached
  */
 export function minor(
   ring: PolynomialRing,
@@ -20,6 +22,7 @@ export function minor(
   rows: readonly number[],
   columns: readonly number[],
   vanishing: ReadonlySet<VariableIndex> = new Set(),
+  budget: Budget = unlimited(),
 ): Polynomial {
   if (rows.length !== columns.length) {
     throw new RangeError(
@@ -29,6 +32,7 @@ export function minor(
   const terms: Term[] = [];
   const chosen = new Uint16Array(ring.variables.length);
   const expand = (k: number, free: readonly number[], sign: bigint): void => {
+    budget.spend(() => `writing out a minor of size ${rows.length}, ${terms.length} terms so far`);
     if (k === rows.length) {
       terms.push({ monomial: chosen.slice(), numerator: sign });
       return;

@@ -2,6 +2,7 @@
  * Ideals of rank conditions: the (r+1)-minors of every bounded corner submatrix, from any corner.
  */
 import type { CornerRanks, RankBound } from "../combinatorics/corner-ranks.js";
+import { type Budget, unlimited } from "../outcomes/budget.js";
 import { isZero, type Polynomial } from "../polynomials/polynomial.js";
 import type {
   PolynomialRing,
@@ -14,12 +15,14 @@ import { minor, sublists } from "./minors.js";
  * The minors that a table of corner rank bounds makes vanish, each once, those that are 0 left out.
  * @param vanishing variables set to 0 in all minors.
  * @throws RangeError when the table does not fit the matrix.
+ * @throws LimitReached
  */
 export function rankMinors(
   ring: PolynomialRing,
   matrix: VariableMatrix,
   table: CornerRanks,
   vanishing: ReadonlySet<VariableIndex> = new Set(),
+  budget: Budget = unlimited(),
 ): Polynomial[] {
   if (table.rows !== matrix.rows || table.columns !== matrix.columns) {
     throw new RangeError(
@@ -35,7 +38,7 @@ export function rankMinors(
         const key = `${r}|${c}`;
         if (seen.has(key)) continue;
         seen.add(key);
-        const f = minor(ring, matrix, r, c, vanishing);
+        const f = minor(ring, matrix, r, c, vanishing, budget);
         if (!isZero(f)) minors.push(f);
       }
     }

@@ -12,6 +12,7 @@ import {
   readPermutation,
 } from "../combinatorics/permutation.js";
 import { dominantPart } from "../combinatorics/rank-function.js";
+import type { Budget } from "../outcomes/budget.js";
 import { read } from "../outcomes/input-fault.js";
 import { type Polynomial, variable } from "../polynomials/polynomial.js";
 import type {
@@ -44,7 +45,8 @@ export function schubertIdeal(w: Permutation): Ideal {
   const cdg: GeneratingSet = {
     kind: "cdg",
     description: "the variables of the dominant part, and the Fulton minors without them",
-    polynomials: () => cdgGenerators(byCorners.ring, matrix, corners, dominantVariables(w, matrix)),
+    polynomials: (budget) =>
+      cdgGenerators(byCorners.ring, matrix, corners, dominantVariables(w, matrix), budget),
   };
   return { ...byCorners, generatingSets: [fulton, cdg, ...others], permutation: w };
 }
@@ -60,7 +62,8 @@ function cdgGenerators(
   matrix: VariableMatrix,
   corners: CornerRanks,
   dominant: readonly VariableIndex[],
+  budget: Budget | undefined,
 ): Polynomial[] {
-  const minors = rankMinors(ring, matrix, essentialBounds(corners), new Set(dominant));
+  const minors = rankMinors(ring, matrix, essentialBounds(corners), new Set(dominant), budget);
   return [...dominant.map((v) => variable(ring, v)), ...minors];
 }

@@ -100,3 +100,8 @@ export function withinBudget<T>(compute: () => T): T | Undecided {
     throw error;
   }
 }
+
+/** Is this a list that was reached, and not a limit? */
+export function isList<T>(found: readonly T[] | Undecided): found is readonly T[] {
+  return Array.isArray(found);
+}

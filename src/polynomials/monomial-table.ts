@@ -213,9 +213,10 @@ function hashWeights(count: number): Int32Array {
   });
 }
 
-/** Sums of odd weights differ mostly in high bits: fold them down before masking. */
+/* Hashes of monomials on a line form an arithmetic progression, which linear probing would pile up. */
 function spread(hash: number): number {
-  return hash ^ (hash >>> 15);
+  const mixed = Math.imul(hash ^ (hash >>> 16), 0x7feb352d);
+  return mixed ^ (mixed >>> 15);
 }
 
 /** With at most 16 variables two bits each (exponent ≥ 1, ≥ 2), else one bit, shared past 32. */

@@ -2,11 +2,13 @@
  * Results as plain objects for `--json`: the keys that the commands promise, big integers as strings,
  * polynomials as text that reads back, and the problem itself, so that every output can be run again.
  */
+
 import type { GroebnerClaim } from "../claims/groebner-claim.js";
-import { isList, type LimitDescription } from "../claims/limit-description.js";
+import type { LimitDescription } from "../claims/limit-description.js";
 import type { Question } from "../claims/question.js";
 import type { TilingsClaim } from "../claims/tilings-claim.js";
 import type { PrimaryComponent } from "../components/primary-components.js";
+import { isList } from "../outcomes/budget.js";
 import { totalDegree } from "../polynomials/exponents.js";
 import { printMonomial, printPolynomial } from "../polynomials/printing.js";
 import { type ProblemDocument, problemDocument } from "../problems/problem-document.js";
@@ -19,7 +21,7 @@ export function groebnerJson(claim: GroebnerClaim, seconds: number): Json {
   const { ideal, generators, order, witness } = claim;
   return {
     ...head(claim),
-    generators: { kind: generators.kind, count: claim.generatorCount },
+    generators: { kind: generators.kind, count: claim.polynomials.length },
     verdict: claim.verdict,
     evidence: claim.evidence,
     ...(witness === undefined
@@ -28,7 +30,7 @@ export function groebnerJson(claim: GroebnerClaim, seconds: number): Json {
           witness: {
             pair: witness.pair.map((k) => k + 1),
             pairGenerators: witness.pair.map((k) => {
-              const f = generators.polynomials()[k];
+              const f = claim.polynomials[k];
               return f === undefined ? "" : printPolynomial(f, order);
             }),
             remainder: printPolynomial(witness.remainder, order),

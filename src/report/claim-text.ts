@@ -1,7 +1,9 @@
 /** Results as text for a terminal: what was asked, the answer, how it is known, then the table. */
+
 import type { GroebnerClaim } from "../claims/groebner-claim.js";
-import { isList, type LimitDescription } from "../claims/limit-description.js";
+import type { LimitDescription } from "../claims/limit-description.js";
 import type { TilingsClaim } from "../claims/tilings-claim.js";
+import { isList } from "../outcomes/budget.js";
 import type { Polynomial } from "../polynomials/polynomial.js";
 import { printMonomial, printPolynomial } from "../polynomials/printing.js";
 import type { TermOrder } from "../polynomials/term-order.js";
@@ -15,7 +17,7 @@ const LONGEST_POLYNOMIAL = 300;
 export function groebnerText(claim: GroebnerClaim, seconds: number): string[] {
   const { ideal, generators, order, witness, basis } = claim;
   const lines = [
-    `${ideal.name}, ${claim.generatorCount} generators (${generators.kind}), ${order.phrase}`,
+    `${ideal.name}, ${claim.polynomials.length} generators (${generators.kind}), ${order.phrase}`,
     claim.verdict === "holds"
       ? "holds: the generators are a Gröbner basis"
       : "fails: the generators are no Gröbner basis",
@@ -25,7 +27,7 @@ export function groebnerText(claim: GroebnerClaim, seconds: number): string[] {
     lines.push(
       `  the S-polynomial of generators ${i} and ${j} leaves a remainder:`,
       ...witness.pair.map((k) => {
-        const f = generators.polynomials()[k];
+        const f = claim.polynomials[k];
         return `    ${String(k + 1).padStart(4)}  ${f === undefined ? "" : shortened(f, order)}`;
       }),
       `    rest  ${shortened(witness.remainder, order)}`,

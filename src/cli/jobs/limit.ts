@@ -1,5 +1,7 @@
 /** The work of `flatlimit limit`. */
-import { describeLimit, isList } from "../../claims/limit-description.js";
+
+import { describeLimit } from "../../claims/limit-description.js";
+import { isList } from "../../outcomes/budget.js";
 import { limitJson } from "../../report/claim-json.js";
 import { limitText } from "../../report/claim-text.js";
 import type { Job } from "../job.js";
