@@ -29,7 +29,10 @@ const started = performance.now();
 const cases = [...permutationsOf(4), ...TROUBLE.map((text) => accept(readPermutation(text)))];
 
 print("Working note: two corners of a rank condition   (examples/corner-note/note.md)", "");
-print(`Cases: all ${cases.length - TROUBLE.length} permutations of S_4, and ${TROUBLE.join(", ")}.`, "");
+print(
+  `Cases: all ${cases.length - TROUBLE.length} permutations of S_4, and ${TROUBLE.join(", ")}.`,
+  "",
+);
 
 const antidiagonal = cases.map((w) => run(w, ANTIDIAGONAL));
 const diagonal = cases.map((w) => run(w, DIAGONAL));
