@@ -7,4 +7,7 @@ export interface Question {
   readonly ideal: Ideal;
   readonly generators: GeneratingSet;
   readonly order: TermOrder;
+  /** What the problem file says of itself, handed on into the results. */
+  readonly title?: string;
+  readonly note?: string;
 }

@@ -26,7 +26,6 @@ export interface JobRequest extends CommonOptions {
 export interface JobSettings {
   readonly generators?: string;
   readonly order?: string;
-  readonly stages?: boolean;
   readonly tilings?: string;
   readonly kind?: string;
   readonly count?: boolean;

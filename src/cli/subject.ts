@@ -6,20 +6,19 @@ import { readFamilyIdeal } from "../families/registry.js";
 import { faulty, quote, type Reading, read } from "../outcomes/input-fault.js";
 import { readOrder } from "../polynomials/order-phrase.js";
 import { generatingSet, type Problem, readProblem } from "../problems/problem.js";
-import { MAX_TEXT } from "../problems/yaml-source.js";
+import { MAX_TEXT } from "../problems/yaml-parsing.js";
 import { accept } from "./job.js";
 import type { JobRequest } from "./request.js";
 
 /** The question of a request. @throws BadInput */
 export function questionOf({ subject, settings }: JobRequest): Question {
-  const { ideal, generators, order } = accept(readSubject(subject));
+  const problem = accept(readSubject(subject));
+  const { ideal } = problem;
+  const { generators, order } = settings;
   return {
-    ideal,
-    generators:
-      settings.generators === undefined
-        ? generators
-        : accept(generatingSet(ideal, settings.generators)),
-    order: settings.order === undefined ? order : accept(readOrder(settings.order, ideal.ring)),
+    ...problem,
+    ...(generators === undefined ? {} : { generators: accept(generatingSet(ideal, generators)) }),
+    ...(order === undefined ? {} : { order: accept(readOrder(order, ideal.ring)) }),
   };
 }
 

@@ -9,12 +9,15 @@ import {
 import { MAX_VARIABLES, type ProblemShape } from "./problem-schema.js";
 import type { KeyPath, YamlSource } from "./yaml-source.js";
 
+type Declaration = NonNullable<ProblemShape["variables"]>;
+type Refuse = (path: KeyPath, message: string, expected: string) => Reading<never>;
+
 /** Builds the ring, or says where the declaration is wrong. */
 export function readRing(
   source: YamlSource,
   variables: ProblemShape["variables"],
 ): Reading<PolynomialRing> {
-  const refuse = (path: KeyPath, message: string, expected: string): Reading<never> => ({
+  const refuse: Refuse = (path, message, expected) => ({
     ok: false,
     fault: source.fault(path, message, expected),
   });
@@ -22,34 +25,45 @@ export function readRing(
     return refuse([], "the variables are not given", "variables: with names or matrices");
   }
   const { names, matrices, pair, degrees } = variables;
-  if ((names === undefined) === (matrices === undefined)) {
+  if (names !== undefined && matrices !== undefined) {
     return refuse(["variables"], "names and matrices", "either names or matrices");
+  }
+  if (names === undefined && matrices === undefined) {
+    return refuse(["variables"], "neither names nor matrices", "either names or matrices");
   }
   if (pair !== undefined && matrices === undefined) {
     return refuse(["variables", "pair"], "a pair without matrices", "two matrices such as [x, y]");
-  }
-  const listed = names ?? (matrices ?? []).map((m) => m.name);
-  const where = names === undefined ? "matrices" : "names";
-  for (const [k, name] of listed.entries()) {
-    const path = ["variables", where, k];
-    if (!VARIABLE_NAME.test(name)) {
-      return refuse(path, `${quote(name)} is no name`, "a letter, then letters, digits or _");
-    }
-    if (listed.indexOf(name) < k) return refuse(path, `${name} stands twice`, "distinct names");
   }
   const count = names?.length ?? (matrices ?? []).reduce((sum, m) => sum + m.rows * m.columns, 0);
   if (count > MAX_VARIABLES) {
     return refuse(["variables"], `${count} variables`, `at most ${MAX_VARIABLES}`);
   }
-  let ring: PolynomialRing;
+  const bad = badName(variables, refuse);
+  if (bad !== undefined) return bad;
+  const ring = arranged(variables, refuse);
+  return !ring.ok || degrees === undefined ? ring : withDegrees(ring.value, degrees, refuse);
+}
+
+function badName({ names, matrices }: Declaration, refuse: Refuse): Reading<never> | undefined {
+  const where = names === undefined ? "matrices" : "names";
+  const listed = names ?? (matrices ?? []).map((m) => m.name);
+  const seen = new Set<string>();
+  for (const [k, name] of listed.entries()) {
+    const path = ["variables", where, k, ...(names === undefined ? ["name"] : [])];
+    if (!VARIABLE_NAME.test(name)) {
+      return refuse(path, `${quote(name)} is no name`, "a letter, then letters, digits or _");
+    }
+    if (seen.has(name)) return refuse(path, `${quote(name)} stands twice`, "distinct names");
+    seen.add(name);
+  }
+  return undefined;
+}
+
+function arranged({ names, matrices, pair }: Declaration, refuse: Refuse): Reading<PolynomialRing> {
+  if (names !== undefined) return read(ringOfVariables(names));
+  const pairing = pair === undefined ? undefined : { x: pair[0], y: pair[1] };
   try {
-    ring =
-      names === undefined
-        ? ringOfMatrices(
-            matrices ?? [],
-            pair === undefined ? undefined : { x: pair[0], y: pair[1] },
-          )
-        : ringOfVariables(names);
+    return read(ringOfMatrices(matrices ?? [], pairing));
   } catch (error) {
     if (!(error instanceof RangeError)) throw error;
     const path = pair === undefined ? ["variables"] : ["variables", "pair"];
@@ -59,17 +73,16 @@ export function readRing(
       error.message.replace(/^expected /, ""),
     );
   }
-  if (degrees === undefined) return read(ring);
-  return withDegrees(ring, degrees, refuse);
 }
 
 function withDegrees(
   ring: PolynomialRing,
   degrees: Readonly<Record<string, readonly number[]>>,
-  refuse: (path: KeyPath, message: string, expected: string) => Reading<never>,
+  refuse: Refuse,
 ): Reading<PolynomialRing> {
   const path = ["variables", "degrees"];
-  const unknown = Object.keys(degrees).find((name) => !ring.variables.includes(name));
+  const known = new Set(ring.variables);
+  const unknown = Object.keys(degrees).find((name) => !known.has(name));
   if (unknown !== undefined) {
     return refuse(
       [...path, unknown],
@@ -77,12 +90,13 @@ function withDegrees(
       "a variable of the ring",
     );
   }
-  const missing = ring.variables.find((name) => degrees[name] === undefined);
+  const missing = ring.variables.find((name) => !Object.hasOwn(degrees, name));
   if (missing !== undefined) {
     return refuse(path, `no degree for ${missing}`, "a degree for every variable");
   }
   const lengths = new Set(Object.values(degrees).map((vector) => vector.length));
-  if (lengths.size > 1)
+  if (lengths.size > 1) {
     return refuse(path, "degrees of different lengths", "vectors of one length");
+  }
   return read({ ...ring, grading: ring.variables.map((name) => degrees[name] ?? []) });
 }

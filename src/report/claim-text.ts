@@ -17,7 +17,7 @@ const LONGEST_POLYNOMIAL = 300;
 export function groebnerText(claim: GroebnerClaim, seconds: number): string[] {
   const { ideal, generators, order, witness, basis } = claim;
   const lines = [
-    `${ideal.name}, ${claim.polynomials.length} generators (${generators.kind}), ${order.phrase}`,
+    `${ideal.name}, ${counted(claim.polynomials.length, "generator")} (${generators.kind}), ${order.phrase}`,
     claim.verdict === "holds"
       ? "holds: the generators are a Gröbner basis"
       : "fails: the generators are no Gröbner basis",
@@ -35,9 +35,11 @@ export function groebnerText(claim: GroebnerClaim, seconds: number): string[] {
     );
   }
   if (basis !== undefined) {
-    lines.push(`reduced basis: ${basis.size} elements, degrees up to ${basis.maxDegree}`);
+    lines.push(
+      `reduced basis: ${counted(basis.size, "element")}, degrees up to ${basis.maxDegree}`,
+    );
   }
-  lines.push(evidence(`${claim.pairsReduced} S-pairs reduced exactly`, seconds));
+  lines.push(evidence(`${counted(claim.pairsReduced, "S-pair")} reduced exactly`, seconds));
   return lines;
 }
 
@@ -53,7 +55,7 @@ export function limitText(description: LimitDescription, seconds: number): strin
 /** The result of `match`. */
 export function tilingsClaimText(claim: TilingsClaim, seconds: number): string[] {
   const { description, matching, tilings, tilingKind } = claim;
-  const counted = `${tilings.length} ${tilingKind} pipe dreams`;
+  const all = counted(tilings.length, `${tilingKind} pipe dream`);
   if (!("verdict" in matching)) {
     return [
       ...limitHead(description),
@@ -75,9 +77,9 @@ export function tilingsClaimText(claim: TilingsClaim, seconds: number): string[]
     ...limitHead(description),
     ...componentTable(description, numbers, remarks),
     verdict === "holds"
-      ? `holds: the components are the ${counted}, with their multiplicities`
-      : `fails: ${counted}, ${unmatchedComponents.length} components without a tiling, ` +
-        `${unmatchedTilings.length} tilings without a component`,
+      ? `holds: the components are the ${all}, with their multiplicities`
+      : `fails: ${all}, ${counted(unmatchedComponents.length, "component")} without a tiling, ` +
+        `${counted(unmatchedTilings.length, "tiling")} without a component`,
   ];
   for (const k of unmatchedTilings) {
     lines.push(
@@ -96,7 +98,7 @@ function limitHead(description: LimitDescription): string[] {
     : "the unit ideal";
   return [
     `${ideal.name}, ${order.phrase}`,
-    `limit: ${limit.generators.length} generators, ${kind}, ${place}`,
+    `limit: ${counted(limit.generators.length, "generator")}, ${kind}, ${place}`,
   ];
 }
 
@@ -130,7 +132,7 @@ function limitFoot(description: LimitDescription, seconds: number): string[] {
   const { limit, unmixed } = description;
   const mixed =
     unmixed === null ? [] : [unmixed ? "no embedded components" : "there are embedded components"];
-  const basis = `reduced basis of ${limit.basis.elements.length} elements, S-pairs reduced exactly`;
+  const basis = `reduced basis of ${counted(limit.basis.elements.length, "element")}, S-pairs reduced exactly`;
   return [...mixed, evidence(basis, seconds)];
 }
 
@@ -142,4 +144,8 @@ function shortened(f: Polynomial, order: TermOrder): string {
   const text = printPolynomial(f, order);
   if (text.length <= LONGEST_POLYNOMIAL) return text;
   return `${text.slice(0, LONGEST_POLYNOMIAL)} … (${f.monomials.length} terms)`;
+}
+
+function counted(count: number, noun: string): string {
+  return `${count} ${noun}${count === 1 ? "" : "s"}`;
 }
