@@ -12,7 +12,11 @@ import { isReducedBasisOf } from "../support/buchberger.js";
 import { orderOf, polynomials, ring, termSet, termSets } from "../support/reading.js";
 import { cyclic, eco, katsura, noon } from "../support/systems.js";
 
-function basisOf(generators: readonly Polynomial[], order: TermOrder, primes?: number[]): RationalBasis {
+function basisOf(
+  generators: readonly Polynomial[],
+  order: TermOrder,
+  primes?: number[],
+): RationalBasis {
   const basis = rationalBasis(generators, order, unlimited(), { primes });
   if (basis.kind === "undecided") throw new Error(basis.reason);
   return basis;
@@ -45,15 +49,19 @@ describe("reduced bases over the rationals", () => {
     ["plain lex", "lex"],
     ["graded lex", "grlex"],
     ["graded revlex", "grevlex"],
-  ] as const)("reproduce 100 random ideals of the reference library in %s", (phrase, key) => {
-    expect(references).toHaveLength(100);
-    for (const { id, vars, gens, gb } of references) {
-      const r = ringOfVariables(vars);
-      const basis = basisOf(polynomials(r, gens), orderOf(r, phrase));
-      expect(termSets(basis.elements), `ideal ${id}`).toEqual(termSets(polynomials(r, gb[key])));
-      expect(basis.evidence).toBe("proved");
-    }
-  }, 120_000);
+  ] as const)(
+    "reproduce 100 random ideals of the reference library in %s",
+    (phrase, key) => {
+      expect(references).toHaveLength(100);
+      for (const { id, vars, gens, gb } of references) {
+        const r = ringOfVariables(vars);
+        const basis = basisOf(polynomials(r, gens), orderOf(r, phrase));
+        expect(termSets(basis.elements), `ideal ${id}`).toEqual(termSets(polynomials(r, gb[key])));
+        expect(basis.evidence).toBe("proved");
+      }
+    },
+    120_000,
+  );
 
   // Sizes: computed with a general-purpose library (cyclic, katsura, noon, eco: shared check values).
   it.each([
@@ -75,8 +83,13 @@ describe("reduced bases over the rationals", () => {
   // Cox, Little, O'Shea, Ideals, Varieties, and Algorithms, ch. 2 §7 (from memory).
   it("are those of the textbook's worked examples", () => {
     const r = ring("x y");
-    const basis = basisOf(polynomials(r, ["x^3 - 2*x*y", "x^2*y - 2*y^2 + x"]), orderOf(r, "graded lex"));
-    expect(termSets(basis.elements)).toEqual(termSets(polynomials(r, ["x^2", "x*y", "y^2 - 1/2*x"])));
+    const basis = basisOf(
+      polynomials(r, ["x^3 - 2*x*y", "x^2*y - 2*y^2 + x"]),
+      orderOf(r, "graded lex"),
+    );
+    expect(termSets(basis.elements)).toEqual(
+      termSets(polynomials(r, ["x^2", "x*y", "y^2 - 1/2*x"])),
+    );
   });
 
   // Cox, Little, O'Shea, ch. 2 §8 (from memory): the twisted cubic by elimination.
@@ -136,7 +149,9 @@ describe("reduced bases over the rationals", () => {
     const order = orderOf(r, "graded revlex");
     expect(basisOf([], order).elements).toEqual([]);
     expect(basisOf(polynomials(r, ["0"]), order).elements).toEqual([]);
-    expect(basisOf(polynomials(r, ["x", "x + 3"]), order).elements.map(termSet)).toEqual(["0,0:1/1"]);
+    expect(basisOf(polynomials(r, ["x", "x + 3"]), order).elements.map(termSet)).toEqual([
+      "0,0:1/1",
+    ]);
   });
 });
 
@@ -146,9 +161,21 @@ describe("bad primes", () => {
 
   it.each([
     ["a prime that changes the leading monomial", ["7*x + y"], [7, 11, 13, 101, 103, 107, 109]],
-    ["a prime that divides a leading coefficient inside", ["x^2 - y*z", "x*y - 7*z^2"], [7, 11, 13, 10007, 10009, 10037, 10039]],
-    ["primes that divide a denominator of the result", ["5*x*y - 3*z^2", "2*x^2 - y*z"], [2, 3, 5, 10007, 10009, 10037, 10039]],
-    ["only small primes at first", ["x^2 + 6*y^2", "x*y + 10*z^2 + 15*y*z"], [2, 3, 5, 7, 11, 13, 10007, 10009, 10037, 10039, 10061]],
+    [
+      "a prime that divides a leading coefficient inside",
+      ["x^2 - y*z", "x*y - 7*z^2"],
+      [7, 11, 13, 10007, 10009, 10037, 10039],
+    ],
+    [
+      "primes that divide a denominator of the result",
+      ["5*x*y - 3*z^2", "2*x^2 - y*z"],
+      [2, 3, 5, 10007, 10009, 10037, 10039],
+    ],
+    [
+      "only small primes at first",
+      ["x^2 + 6*y^2", "x*y + 10*z^2 + 15*y*z"],
+      [2, 3, 5, 7, 11, 13, 10007, 10009, 10037, 10039, 10061],
+    ],
   ])("do not mislead: %s", (_, texts, primes) => {
     const generators = polynomials(r, texts);
     const found = rationalBasis(generators, order, unlimited(), { primes });

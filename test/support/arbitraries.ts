@@ -25,7 +25,9 @@ export function randomPolynomial(
   return fc
     .array(term, { minLength: 1, maxLength: terms })
     .chain((list) =>
-      fc.integer({ min: 1, max: 3 }).map((d) => polynomial(ring, list, homogeneous ? 1n : BigInt(d))),
+      fc
+        .integer({ min: 1, max: 3 })
+        .map((d) => polynomial(ring, list, homogeneous ? 1n : BigInt(d))),
     );
 }
 

@@ -3,11 +3,7 @@
  * (Cox, Little, O'Shea, *Ideals, Varieties, and Algorithms*, chapter 2, sections 3, 6, 7), over the
  * polynomials of the seams, without criteria, tables or matrices. Independent of `src/groebner`.
  */
-import {
-  dividesExponents,
-  type Exponents,
-  lcmExponents,
-} from "../../src/polynomials/exponents.js";
+import { dividesExponents, type Exponents, lcmExponents } from "../../src/polynomials/exponents.js";
 import { leadingMonomialOf } from "../../src/polynomials/leading-terms.js";
 import {
   add,
@@ -51,7 +47,11 @@ export function sPolynomial(f: Polynomial, g: Polynomial, order: TermOrder): Pol
 }
 
 /** The remainder of the division of f by the set: no term of it is divisible by a leading monomial. */
-export function normalForm(f: Polynomial, set: readonly Polynomial[], order: TermOrder): Polynomial {
+export function normalForm(
+  f: Polynomial,
+  set: readonly Polynomial[],
+  order: TermOrder,
+): Polynomial {
   const divisors = set.filter((g) => !isZero(g)).map((g) => monic(g, order));
   const leads = divisors.map((g) => leadingMonomialOf(g, order));
   let rest = f;

@@ -1,6 +1,12 @@
 /** Systems of the literature, as polynomials over the rationals. */
-import { constant, type Polynomial, variable } from "../../src/polynomials/polynomial.js";
-import { add, multiply, subtract } from "../../src/polynomials/polynomial.js";
+import {
+  add,
+  constant,
+  multiply,
+  type Polynomial,
+  subtract,
+  variable,
+} from "../../src/polynomials/polynomial.js";
 import { ringOfVariables, type VariableIndex } from "../../src/polynomials/polynomial-ring.js";
 
 function make(count: number): { x: (i: number) => Polynomial; c: (n: number) => Polynomial } {
@@ -50,7 +56,11 @@ export function cyclic(n: number): Polynomial[] {
 export function noon(n: number): Polynomial[] {
   const { x, c } = make(n);
   return range(n).map((i) => {
-    const squares = sum(range(n).filter((j) => j !== i).map((j) => multiply(x(j), x(j))));
+    const squares = sum(
+      range(n)
+        .filter((j) => j !== i)
+        .map((j) => multiply(x(j), x(j))),
+    );
     return add(subtract(product([c(10), x(i), squares]), multiply(c(11), x(i))), c(10));
   });
 }
@@ -60,10 +70,7 @@ export function eco(n: number): Polynomial[] {
   const { x, c } = make(n);
   const last = x(n - 1);
   const rows = range(n - 1).map((k) => {
-    const inner = sum([
-      x(k),
-      ...range(n - 2 - k).map((i) => multiply(x(i), x(i + k + 1))),
-    ]);
+    const inner = sum([x(k), ...range(n - 2 - k).map((i) => multiply(x(i), x(i + k + 1)))]);
     return subtract(multiply(inner, last), c(k + 1));
   });
   return [...rows, add(sum(range(n - 1).map(x)), c(1))];
