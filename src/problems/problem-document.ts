@@ -16,28 +16,27 @@ export type ProblemDocument = Readonly<Record<string, unknown>>;
 /** The document of a problem: families by name, all else by polynomials written out. */
 export function problemDocument(problem: Problem): ProblemDocument {
   const { ideal, generators, order, title, note } = problem;
-  const head = {
+  const family = familyMember(ideal);
+  const { permutation } = ideal;
+  return {
     ...(title === undefined ? {} : { title }),
     ...(note === undefined ? {} : { note }),
-  };
-  const tail = { order: order.phrase };
-  if (isFamilyMember(ideal)) {
-    return { ...head, ideal: { family: ideal.name }, generators: generators.kind, ...tail };
-  }
-  return {
-    ...head,
-    variables: variablesDocument(ideal.ring),
-    ideal: { polynomials: generators.polynomials().map((f) => printPolynomial(f)) },
-    ...tail,
-    ...(ideal.permutation === undefined
+    ...(family === undefined
+      ? {
+          variables: variablesDocument(ideal.ring),
+          ideal: { polynomials: generators.polynomials().map((f) => printPolynomial(f)) },
+        }
+      : { ideal: { family: ideal.name }, generators: generators.kind }),
+    order: order.phrase,
+    ...(permutation === undefined || String(permutation) === String(family?.permutation)
       ? {}
-      : { permutation: printPermutation(ideal.permutation) }),
+      : { permutation: printPermutation(permutation) }),
   };
 }
 
-function isFamilyMember(ideal: Ideal): boolean {
-  const named = readFamilyIdeal(ideal.name);
-  return named.ok && named.value.name === ideal.name;
+function familyMember({ name }: Ideal): Ideal | undefined {
+  const member = readFamilyIdeal(name);
+  return member.ok && member.value.name === name ? member.value : undefined;
 }
 
 function variablesDocument(ring: PolynomialRing): ProblemDocument {

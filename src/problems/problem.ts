@@ -20,16 +20,16 @@ import { cornerBoundsIdeal } from "../families/corner-table-ideal.js";
 import type { GeneratingSet, Ideal } from "../families/ideal.js";
 import { readFamilyIdeal } from "../families/registry.js";
 import { type InputFault, quote, type Reading, read } from "../outcomes/input-fault.js";
-import { nearestName } from "../polynomials/nearest-name.js";
-import { readOrder } from "../polynomials/order-phrase.js";
 import { isZero, type Polynomial } from "../polynomials/polynomial.js";
 import type { PolynomialRing } from "../polynomials/polynomial-ring.js";
 import { readPolynomial } from "../polynomials/reading.js";
 import type { TermOrder } from "../polynomials/term-order.js";
 import { homogeneityFault } from "./grading.js";
-import { KNOWN_KEYS, type ProblemShape, problemSchema } from "./problem-schema.js";
+import { readOrderShape } from "./order-reading.js";
+import type { ProblemShape } from "./problem-schema.js";
 import { readRing } from "./ring-reading.js";
-import { type KeyPath, YamlSource } from "./yaml-source.js";
+import { readShape } from "./shape-reading.js";
+import { YamlSource } from "./yaml-source.js";
 
 /** A problem: an ideal, one of its generating sets, an order. */
 export interface Problem {
@@ -54,7 +54,7 @@ export function readProblem(text: string, file?: string): Reading<Problem> {
   const source = YamlSource.read(text, file);
   if (!source.ok) return source;
   try {
-    return read(problemOf(source.value, shapeOf(source.value)));
+    return read(problemOf(source.value, accept(readShape(source.value))));
   } catch (error) {
     if (error instanceof Refusal) return { ok: false, fault: error.fault };
     throw error;
@@ -69,27 +69,6 @@ export function generatingSet(ideal: Ideal, kind: string | undefined): Reading<G
   const message = `${ideal.name} has no generating set ${quote(kind ?? "")}`;
   const expected = `one of ${sets.map((set) => set.kind).join(", ")}`;
   return { ok: false, fault: { code: "input-fault", message, expected } };
-}
-
-function shapeOf(source: YamlSource): ProblemShape {
-  const parsed = problemSchema.safeParse(source.content());
-  if (parsed.success) return parsed.data;
-  const [issue] = parsed.error.issues;
-  const path: KeyPath = issue?.path ?? [];
-  if (issue?.code === "unrecognized_keys") {
-    const [key = ""] = issue.keys;
-    const near = nearestName(key, KNOWN_KEYS);
-    const expected =
-      near === undefined ? `one of ${KNOWN_KEYS.slice(0, 7).join(", ")}` : `${near}, perhaps`;
-    throw new Refusal(source.fault(path, `unknown key ${quote(key)}`, expected, key));
-  }
-  const where = path.length === 0 ? "the problem" : path.map(String).join(".");
-  const message = issue?.message ?? "expected another shape";
-  throw new Refusal(
-    message.startsWith("expected ")
-      ? source.fault(path, `${where} is not right`, message.slice("expected ".length))
-      : source.fault(path, `${where}: ${message}`),
-  );
 }
 
 function problemOf(source: YamlSource, shape: ProblemShape): Problem {
@@ -117,7 +96,7 @@ function idealOf(source: YamlSource, shape: ProblemShape): Ideal {
   const ideal =
     family === undefined ? declaredIdeal(source, shape) : familyIdeal(source, shape, family);
   if (shape.permutation === undefined) return ideal;
-  const permutation = accept(source, ["permutation"], readPermutation(shape.permutation));
+  const permutation = accept(source.moved(["permutation"], readPermutation(shape.permutation)));
   const [matrix] = ideal.ring.matrices;
   if (matrix?.rows !== permutation.length || matrix.columns !== permutation.length) {
     const expected = "a permutation of the size of the first matrix";
@@ -139,12 +118,12 @@ function familyIdeal(source: YamlSource, shape: ProblemShape, family: string): I
       ),
     );
   }
-  return accept(source, ["ideal", "family"], readFamilyIdeal(family));
+  return accept(source.moved(["ideal", "family"], readFamilyIdeal(family)));
 }
 
 function declaredIdeal(source: YamlSource, shape: ProblemShape): Ideal {
-  const ring = accept(source, [], readRing(source, shape.variables));
-  const name = source.file ?? shape.title ?? "the problem";
+  const ring = accept(readRing(source, shape.variables));
+  const name = ownName(source.file ?? shape.title);
   if (shape.ideal.ranks !== undefined) return ranksIdeal(source, ring, name, shape.ideal.ranks);
   const polynomials = (shape.ideal.polynomials ?? []).map((text, k) =>
     generator(source, ring, text, k),
@@ -161,6 +140,11 @@ function declaredIdeal(source: YamlSource, shape: ProblemShape): Ideal {
     ],
     defaultOrder: "graded revlex",
   };
+}
+
+/* A file or title that reads like a member of a family must not pass for it. */
+function ownName(name = "the problem"): string {
+  return readFamilyIdeal(name).ok ? `problem ${name}` : name;
 }
 
 function generator(source: YamlSource, ring: PolynomialRing, text: string, k: number): Polynomial {
@@ -207,42 +191,11 @@ function ranksIdeal(
 
 function orderOf(source: YamlSource, shape: ProblemShape, ideal: Ideal): TermOrder {
   const { order = ideal.defaultOrder } = shape;
-  if (typeof order === "string") return accept(source, ["order"], readOrder(order, ideal.ring));
-  const { weights, next, refinement } = order;
-  const last = next ?? refinement;
-  if (last === undefined || (next !== undefined && refinement !== undefined)) {
-    throw new Refusal(
-      source.fault(
-        ["order"],
-        "weights alone do not order all monomials",
-        "either next or refinement",
-      ),
-    );
-  }
-  const vectors = weights.map((vector, k) => {
-    if (Array.isArray(vector)) return vector;
-    const unknown = Object.keys(vector).find((name) => !ideal.ring.variables.includes(name));
-    if (unknown !== undefined) {
-      const path = ["order", "weights", k];
-      throw new Refusal(
-        source.fault(path, `unknown variable ${quote(unknown)}`, "a variable of the ring", unknown),
-      );
-    }
-    return ideal.ring.variables.map((name) => vector[name] ?? 0);
-  });
-  const words = vectors.map((vector) => `weights (${vector.join(",")})`).join(" then ");
-  const phrase = `${words} ${next === undefined ? "refined by" : "then"} ${last}`;
-  const read = readOrder(phrase, ideal.ring);
-  if (!read.ok) throw new Refusal(source.fault(["order"], read.fault.message, read.fault.expected));
-  return read.value;
+  return accept(readOrderShape(source, order, ideal.ring));
 }
 
-/* A fault inside a value is moved to where the value stands in the file. */
-function accept<T>(source: YamlSource, path: KeyPath, reading: Reading<T>): T {
+/* The value, or on with the fault. */
+function accept<T>(reading: Reading<T>): T {
   if (reading.ok) return reading.value;
-  const { fault } = reading;
-  if (path.length === 0) throw new Refusal(fault);
-  const offset = (fault.place?.line ?? 1) === 1 ? (fault.place?.column ?? 1) - 1 : 0;
-  const located = source.fault(path, fault.message, fault.expected);
-  throw new Refusal({ ...located, ...source.locatorOf(path)(offset) });
+  throw new Refusal(reading.fault);
 }

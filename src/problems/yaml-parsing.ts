@@ -130,7 +130,7 @@ function checkKeys(map: YAMLMap): void {
   const seen = new Set<string>();
   for (const { key } of map.items) {
     const offset = (key as Node | null)?.range?.[0] ?? map.range?.[0] ?? 0;
-    if (!isScalar(key) || typeof key.value !== "string") {
+    if (!isScalar(key) || typeof key.value !== "string" || key.value === "__proto__") {
       throw new YamlFault(offset, "a key that is no word", "one of the keys of a problem");
     }
     if (seen.has(key.value)) {

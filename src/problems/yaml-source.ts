@@ -81,6 +81,15 @@ export class YamlSource {
     };
   }
 
+  /** The reading of a text value: a fault inside it is moved to where it stands in the file. */
+  moved<T>(path: KeyPath, reading: Reading<T>): Reading<T> {
+    if (reading.ok) return reading;
+    const { message, expected, place } = reading.fault;
+    const offset = (place?.line ?? 1) === 1 ? (place?.column ?? 1) - 1 : 0;
+    const fault = this.fault(path, message, expected);
+    return { ok: false, fault: { ...fault, ...this.locatorOf(path)(offset) } };
+  }
+
   /** The place and line of an offset of the text. */
   locate(offset: number): { readonly place: Place; readonly excerpt: string } {
     return locate(this.#text, offset);
