@@ -1,7 +1,7 @@
 /**
  * YAML text to a document tree, or its first fault. Every scalar is text. What a problem needs none of is
  * refused: anchors and aliases (a small file could unfold into a huge one), tags, keys that are no words,
- * several documents. Any text of the length allowed ends in a moment: the parser is fed token by token, so
+ * directives, several documents. Any text of the length allowed ends in a moment: the parser is fed token by token, so
  * that it stops at the first stray one, and keys are compared here, since its own comparison is quadratic.
  */
 import {
@@ -24,6 +24,9 @@ export const MAX_TEXT = 4_000_000;
 const MAX_DEPTH = 50;
 /** The largest number of scalars, signs and pieces of white space. */
 const MAX_TOKENS = 400_000;
+
+/** What any text has to be. */
+const SYNTAX = "YAML or JSON";
 
 /** Tags that say what is the case anyway. */
 const PLAIN_TAGS = ["str", "map", "seq"].map((name) => `tag:yaml.org,2002:${name}`);
@@ -85,15 +88,16 @@ function* tokensOf(text: string): ReturnType<Parser["parse"]> {
       throw new YamlFault(parser.offset, "the file has too many parts", `at most ${MAX_TOKENS}`);
     }
     for (const token of parser.next(lexeme)) {
-      if (token.type === "error") throw strayFault(token.offset, token.source);
+      if (token.type === "error") {
+        throw new YamlFault(token.offset, `${quote(token.source)} cannot stand here`, SYNTAX);
+      }
+      if (token.type === "directive") {
+        throw new YamlFault(token.offset, `a directive ${quote(token.source)}`, "no directives");
+      }
       yield token;
     }
   }
   yield* parser.end();
-}
-
-function strayFault(offset: number, source: string): YamlFault {
-  return new YamlFault(offset, `${quote(source)} cannot stand here`, "YAML or JSON");
 }
 
 function syntaxFault(offset: number, code: string, message: string): YamlFault {
@@ -101,7 +105,7 @@ function syntaxFault(offset: number, code: string, message: string): YamlFault {
     return new YamlFault(offset, "a tab in the indentation", "spaces");
   }
   const [line = ""] = message.split("\n", 1);
-  return new YamlFault(offset, line.slice(0, 200).replace(/\.$/, ""), "YAML or JSON");
+  return new YamlFault(offset, line.slice(0, 200).replace(/\.$/, ""), SYNTAX);
 }
 
 function isBlank(node: Node): boolean {
