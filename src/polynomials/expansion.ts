@@ -3,7 +3,7 @@
  * moment, in a polynomial or in a fault at the operator. Work is counted in term operations, weighted by
  * the lengths of the coefficients; clocks are not asked, so that a text reads alike on every machine.
  */
-import { gcd } from "../arithmetic/integers.js";
+import { absolute, gcd } from "../arithmetic/integers.js";
 import { ExponentOverflow, MAX_EXPONENT } from "./exponents.js";
 import {
   constant,
@@ -151,7 +151,7 @@ export class Expansion {
 
   /* A polynomial that may be kept; in particular its text can be read again. */
   #checked(f: Polynomial, offset: number): Polynomial {
-    if (Math.max(longest(f), bits(f.denominator)) > LONGEST_BITS) throw lengthFault(offset);
+    if (isTooLong(f.denominator) || f.numerators.some(isTooLong)) throw lengthFault(offset);
     if (f.monomials.length <= MOST_TERMS) return f;
     throw new TextFault(
       offset,
@@ -171,6 +171,13 @@ function lengthFault(offset: number): TextFault {
 
 function exponentFault(offset: number): TextFault {
   return new TextFault(offset, "an exponent becomes too large", `exponents up to ${MAX_EXPONENT}`);
+}
+
+/* Has an integer more digits than may be read? Digits are only counted when bits do not decide. */
+function isTooLong(n: bigint): boolean {
+  const length = bits(n);
+  if (length <= LONGEST_BITS) return false;
+  return length > LONGEST_BITS + 4 || absolute(n).toString().length > LONGEST_NUMBER;
 }
 
 /* The bit length of the longest numerator. */

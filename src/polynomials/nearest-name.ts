@@ -1,9 +1,15 @@
 /** The name a user may have meant: the nearest known one by edit distance (Levenshtein). */
 
-/** The nearest of the names, or undefined when none is within a third of the word's length. */
+/** The longest word that is taken for a misspelt name; bounds the work. */
+const LONGEST_WORD = 40;
+
+/**
+ * The nearest of the names, upper and lower case alike; undefined when none is within a third of the
+ * word's length, or within one change for words of two or three letters.
+ */
 export function nearestName(word: string, names: readonly string[]): string | undefined {
-  const allowed = Math.max(1, Math.floor(word.length / 3));
-  if (word.length > 40) return undefined;
+  if (word.length > LONGEST_WORD) return undefined;
+  const allowed = word.length === 2 ? 1 : Math.floor(word.length / 3);
   let nearest: string | undefined;
   let least = allowed + 1;
   for (const name of names) {

@@ -125,7 +125,7 @@ class OrderReader {
     }
     const start = words.offset();
     const plain = words.takes("plain");
-    if (plain && words.peek() === "lex" && words.peek(1) !== "from") {
+    if (plain && words.peek() === "lex" && ![",", "from"].includes(words.peek(1) ?? "")) {
       words.takes("lex");
       return listedLex(this.#ring, false);
     }

@@ -11,11 +11,17 @@ import {
   read,
 } from "../outcomes/input-fault.js";
 
+/** A place, with the line it points into. */
+interface Spot {
+  readonly place: Place;
+  readonly excerpt: string;
+}
+
 /** Where a text stands, when it is part of a larger one. */
 export interface TextSource {
   readonly file?: string;
   /** The place of an offset of the text in the file; default: in the text itself. */
-  readonly locate?: (offset: number) => { readonly place: Place; readonly excerpt: string };
+  readonly locate?: (offset: number) => Spot;
 }
 
 /** A fault on its way out of a recursive descent. */
@@ -47,24 +53,25 @@ export function readingOf<T>(text: string, source: TextSource, parse: () => T): 
  * point into the larger text.
  */
 export function textWithin(whole: string, start: number, file?: string): TextSource {
-  const locate = (offset: number): { readonly place: Place; readonly excerpt: string } => ({
-    place: placeAt(whole, start + offset),
-    excerpt: lineAround(whole, start + offset),
-  });
+  const locate = (offset: number): Spot => spotIn(whole, start + offset);
   return { locate, ...(file === undefined ? {} : { file }) };
 }
 
 function located(
   text: string,
   { message, expected, offset }: TextFault,
-  { file, locate = textWithin(text, 0).locate }: TextSource,
+  { file, locate }: TextSource,
 ): Omit<InputFault, "code"> {
   return {
     message,
-    ...locate?.(offset),
+    ...(locate === undefined ? spotIn(text, offset) : locate(offset)),
     ...(expected === undefined ? {} : { expected }),
     ...(file === undefined ? {} : { file }),
   };
+}
+
+function spotIn(text: string, offset: number): Spot {
+  return { place: placeAt(text, offset), excerpt: lineAround(text, offset) };
 }
 
 function lineAround(text: string, offset: number): string {

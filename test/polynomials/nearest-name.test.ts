@@ -12,6 +12,7 @@ describe("the nearest name", () => {
     ["duel", "dual"],
     ["gradd", "graded"],
     ["x", undefined],
+    ["D", undefined],
     ["polynomial", undefined],
     ["", undefined],
   ])("for %j is %j", (word, expected) => {
