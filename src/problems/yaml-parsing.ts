@@ -57,10 +57,14 @@ export function parseYaml(text: string): Document.Parsed {
     document = composed;
   }
   if (document?.contents == null || isBlank(document.contents)) {
-    throw new YamlFault(0, "the file is empty", "a problem: at least the key ideal");
+    throw emptyFault();
   }
   checkNodes(document);
   return document;
+}
+
+function emptyFault(): YamlFault {
+  return new YamlFault(0, "the file is empty", "a problem: at least the key ideal");
 }
 
 /* What can be refused before parsing, which recurses on nesting. */
@@ -68,6 +72,7 @@ function checkText(text: string): void {
   if (text.length > MAX_TEXT) {
     throw new YamlFault(0, "the file is too large", `at most ${MAX_TEXT} characters`);
   }
+  if (text.trim() === "") throw emptyFault();
   const control = /[^\P{Cc}\t\n\r]/u.exec(text);
   if (control !== null) {
     const message = "the file is not text: it has control characters";
