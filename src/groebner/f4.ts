@@ -8,15 +8,13 @@
  */
 import type { Budget } from "../outcomes/budget.js";
 import type { MonomialId, MonomialTable } from "../polynomials/monomial-table.js";
+import type { Multigrading } from "../polynomials/multigrading.js";
 import { type CriticalPair, CriticalPairs } from "./critical-pairs.js";
 import { DivisorSearch } from "./divisor-search.js";
+import { MatrixReduction } from "./matrix-reduction.js";
 import type { Remainder, RowArithmetic } from "./row-arithmetic.js";
 import { leadingMonomial, type Support } from "./rows.js";
-import {
-  type MatrixRequest,
-  type Multiple,
-  SymbolicPreprocessing,
-} from "./symbolic-preprocessing.js";
+import type { MatrixRequest, Multiple } from "./symbolic-preprocessing.js";
 
 /** One matrix of a run: the rows that gave something, and the leading monomials that came out. */
 interface TraceStep {
@@ -36,31 +34,35 @@ export interface GrownBasis<R extends Support> {
   readonly minimal: Int32Array;
 }
 
+/** What a basis is grown from. */
+export interface BasisInput<R extends Support> {
+  readonly table: MonomialTable;
+  readonly inputs: readonly R[];
+  readonly arithmetic: RowArithmetic<R>;
+  /** A grading in which the inputs are homogeneous; matrices are split along it. */
+  readonly grading: () => Multigrading;
+  readonly budget: Budget;
+}
+
 /** The state that a run and a replay share: elements, reducers, matrices. */
 class Growth<R extends Support> {
   readonly elements: R[];
   readonly divisors: DivisorSearch;
-  readonly #matrices: SymbolicPreprocessing;
-  readonly #arithmetic: RowArithmetic<R>;
-  readonly #budget: Budget;
+  readonly #table: MonomialTable;
+  readonly #matrices: MatrixReduction<R>;
 
-  constructor(
-    table: MonomialTable,
-    inputs: readonly R[],
-    arithmetic: RowArithmetic<R>,
-    budget: Budget,
-  ) {
+  constructor({ table, inputs, arithmetic, grading, budget }: BasisInput<R>) {
     this.elements = [...inputs];
     this.divisors = new DivisorSearch(table);
-    this.#matrices = new SymbolicPreprocessing(table);
-    this.#arithmetic = arithmetic;
-    this.#budget = budget;
+    this.#table = table;
+    this.#matrices = new MatrixReduction(table, arithmetic, grading, budget);
   }
 
   /** Reduces the requested rows to echelon form, smallest leading monomial first. */
   reduce(request: MatrixRequest): Remainder<R>[] {
-    const matrix = this.#matrices.build(request, this.elements, this.divisors, this.#budget);
-    return this.#arithmetic.eliminate(matrix, this.elements, "echelon", this.#budget);
+    return this.#matrices
+      .reduce(request, this.elements, this.divisors, "echelon")
+      .sort((a, b) => this.#table.compare(leadingMonomial(a.row), leadingMonomial(b.row)));
   }
 
   /** Adds an element; returns its index. */
@@ -80,12 +82,13 @@ class Growth<R extends Support> {
  * @throws LimitReached when the budget is spent or an exponent overflows.
  */
 export function growBasis<R extends Support>(
-  table: MonomialTable,
-  inputs: readonly R[],
-  arithmetic: RowArithmetic<R>,
-  budget: Budget,
-): { readonly basis: GrownBasis<R>; readonly trace: Trace } {
-  const growth = new Growth(table, inputs, arithmetic, budget);
+  input: BasisInput<R>,
+): {
+  readonly basis: GrownBasis<R>;
+  readonly trace: Trace;
+} {
+  const { table, inputs, budget } = input;
+  const growth = new Growth(input);
   const pairs = new CriticalPairs(table);
   const steps: TraceStep[] = [];
   const waiting = new Map<number, Multiple[]>();
@@ -122,13 +125,10 @@ export function growBasis<R extends Support>(
  * they form a Gröbner basis is not checked.
  */
 export function replayTrace<R extends Support>(
-  table: MonomialTable,
-  inputs: readonly R[],
+  input: BasisInput<R>,
   trace: Trace,
-  arithmetic: RowArithmetic<R>,
-  budget: Budget,
 ): GrownBasis<R> | undefined {
-  const growth = new Growth(table, inputs, arithmetic, budget);
+  const growth = new Growth(input);
   for (const { request, leads } of trace.steps) {
     const found = growth.reduce(request);
     if (found.length !== leads.length) return undefined;
@@ -142,26 +142,16 @@ export function replayTrace<R extends Support>(
  * The reduced Gröbner basis from a grown one: minimal elements, tails reduced, smallest leading
  * monomial first.
  */
-export function reduceBasis<R extends Support>(
-  table: MonomialTable,
-  basis: GrownBasis<R>,
-  arithmetic: RowArithmetic<R>,
-  budget: Budget,
-): R[] {
+export function reduceBasis<R extends Support>(input: BasisInput<R>, basis: GrownBasis<R>): R[] {
+  const { table, arithmetic, grading, budget } = input;
   const elements = Array.from(basis.minimal, (k) => basis.elements[k] as R);
   const divisors = new DivisorSearch(table);
   elements.forEach((row, k) => {
     divisors.add(k, leadingMonomial(row));
   });
   const rows = elements.map((_, element) => ({ element, multiplier: table.one }));
-  const matrix = new SymbolicPreprocessing(table).build(
-    { rows, pivots: [] },
-    elements,
-    divisors,
-    budget,
-  );
-  return arithmetic
-    .eliminate(matrix, elements, "tails", budget)
+  return new MatrixReduction(table, arithmetic, grading, budget)
+    .reduce({ rows, pivots: [] }, elements, divisors, "tails")
     .map(({ row }) => row)
     .sort((a, b) => table.compare(leadingMonomial(a), leadingMonomial(b)));
 }

@@ -12,6 +12,7 @@
  */
 import type { Budget } from "../outcomes/budget.js";
 import type { MonomialTable } from "../polynomials/monomial-table.js";
+import type { Multigrading } from "../polynomials/multigrading.js";
 import { exactArithmetic } from "./exact-elimination.js";
 import { replayTrace, type Trace } from "./f4.js";
 import { type ExactRow, rowOver } from "./rows.js";
@@ -30,31 +31,37 @@ export interface BasisClaim {
   /** Its leading monomials must be those of the reduced basis of the inputs modulo a prime. */
   readonly basis: readonly ExactRow[];
   readonly membership: Membership;
+  /** A grading in which the inputs are homogeneous. */
+  readonly grading: () => Multigrading;
 }
 
 /** Is the claim proved? False means that this proof failed, not that the claim is false. */
 export function proveBasis(claim: BasisClaim, budget: Budget): boolean {
-  const { table, inputs, basis } = claim;
+  const { table, inputs, basis, grading } = claim;
   return (
-    reduceToZero(table, inputs, basis, budget) &&
-    checkPairs(table, basis, budget).failing === undefined &&
+    reduceToZero(table, inputs, basis, grading, budget) &&
+    checkPairs(table, basis, grading, budget).failing === undefined &&
     liesInIdeal(claim, budget)
   );
 }
 
-function liesInIdeal({ table, inputs, basis, membership }: BasisClaim, budget: Budget): boolean {
+function liesInIdeal(claim: BasisClaim, budget: Budget): boolean {
+  const { table, inputs, basis, membership, grading } = claim;
   switch (membership.kind) {
     case "homogeneous":
       return true;
     case "known": {
       const moved = basis.map((row) => rowOver(membership.table, table, row));
-      return reduceToZero(membership.table, moved, membership.rows, budget);
+      return reduceToZero(membership.table, moved, membership.rows, grading, budget);
     }
     case "replay": {
-      const members = replayTrace(table, inputs, membership.trace, exactArithmetic(), budget);
+      const members = replayTrace(
+        { table, inputs, arithmetic: exactArithmetic(), grading, budget },
+        membership.trace,
+      );
       if (members === undefined) return false;
       const minimal = Array.from(members.minimal, (k) => members.elements[k] as ExactRow);
-      return reduceToZero(table, basis, minimal, budget);
+      return reduceToZero(table, basis, minimal, grading, budget);
     }
   }
 }

@@ -10,9 +10,10 @@ import { FAST_PRIME_LIMIT, primesBelow } from "../arithmetic/primes.js";
 import { type Budget, LimitReached, type Undecided, withinBudget } from "../outcomes/budget.js";
 import { gradedRevlex } from "../polynomials/graded-revlex.js";
 import { MonomialTable } from "../polynomials/monomial-table.js";
+import { finestGradingLater } from "../polynomials/multigrading.js";
 import { isHomogeneous, isZero, type Polynomial } from "../polynomials/polynomial.js";
 import type { TermOrder } from "../polynomials/term-order.js";
-import { growBasis, reduceBasis, replayTrace, type Trace } from "./f4.js";
+import { type BasisInput, growBasis, reduceBasis, replayTrace, type Trace } from "./f4.js";
 import { modularArithmetic } from "./modular-elimination.js";
 import { areImages, JoinedBases } from "./modular-lift.js";
 import { type Membership, proveBasis } from "./proof.js";
@@ -66,12 +67,13 @@ export function rationalBasis(
     const table = new MonomialTable(order);
     const nonZero = generators.filter((f) => !isZero(f));
     const inputs = nonZero.map((f) => exactRow(table, f));
+    const grading = finestGradingLater(nonZero);
     const membership = membershipProof(nonZero, order, budget);
     const groups = new Map<string, Group>();
     const traces: Trace[] = [];
     for (const prime of options.primes ?? primesBelow(FAST_PRIME_LIMIT)) {
       const field = primeField(prime);
-      const image = imageModulo(table, inputs, field, traces, budget);
+      const image = imageModulo({ table, inputs, grading, budget }, field, traces);
       if (image === undefined) continue;
       const group = groupOf(groups, image.rows);
       const { candidate, joined } = group;
@@ -81,7 +83,7 @@ export function rationalBasis(
         areImages(field, candidate, image.rows)
       ) {
         const proof = membership(image.trace);
-        if (proveBasis({ table, inputs, basis: candidate, membership: proof }, budget)) {
+        if (proveBasis({ table, inputs, basis: candidate, membership: proof, grading }, budget)) {
           return finished(order, table, candidate, [...joined.primes, prime]);
         }
         group.proofAt *= 2;
@@ -116,25 +118,24 @@ function membershipProof(
 
 /** The reduced basis modulo a prime; undefined when the prime divides a leading coefficient of the input. */
 function imageModulo(
-  table: MonomialTable,
-  inputs: readonly ExactRow[],
+  { inputs, ...common }: Omit<BasisInput<ExactRow>, "arithmetic">,
   field: PrimeField,
   traces: Trace[],
-  budget: Budget,
 ): { readonly rows: ModularRow[]; readonly trace: Trace } | undefined {
   const images = inputs.map((row) => modularRow(field, row));
   if (images.includes(undefined)) return undefined;
-  const rows = images.filter((row) => row !== undefined);
-  const arithmetic = modularArithmetic(field);
+  const input: BasisInput<ModularRow> = {
+    ...common,
+    inputs: images.filter((row) => row !== undefined),
+    arithmetic: modularArithmetic(field),
+  };
   for (const trace of traces) {
-    const replayed = replayTrace(table, rows, trace, arithmetic, budget);
-    if (replayed !== undefined) {
-      return { rows: reduceBasis(table, replayed, arithmetic, budget), trace };
-    }
+    const replayed = replayTrace(input, trace);
+    if (replayed !== undefined) return { rows: reduceBasis(input, replayed), trace };
   }
-  const { basis, trace } = growBasis(table, rows, arithmetic, budget);
+  const { basis, trace } = growBasis(input);
   traces.push(trace);
-  return { rows: reduceBasis(table, basis, arithmetic, budget), trace };
+  return { rows: reduceBasis(input, basis), trace };
 }
 
 function groupOf(groups: Map<string, Group>, rows: readonly ModularRow[]): Group {

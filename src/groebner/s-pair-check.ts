@@ -5,12 +5,14 @@
  */
 import type { Budget } from "../outcomes/budget.js";
 import type { MonomialId, MonomialTable } from "../polynomials/monomial-table.js";
+import type { Multigrading } from "../polynomials/multigrading.js";
 import { CriticalPairs } from "./critical-pairs.js";
 import { DivisorSearch } from "./divisor-search.js";
 import { exactArithmetic } from "./exact-elimination.js";
 import { matrixOfPairs } from "./f4.js";
+import { MatrixReduction } from "./matrix-reduction.js";
 import { type ExactRow, leadingMonomial } from "./rows.js";
-import { type MatrixRow, SymbolicPreprocessing } from "./symbolic-preprocessing.js";
+import type { Multiple } from "./symbolic-preprocessing.js";
 
 /** A pair whose S-polynomial does not reduce to zero. */
 export interface FailingPair {
@@ -34,24 +36,30 @@ export interface PairCheck {
 export function checkPairs(
   table: MonomialTable,
   rows: readonly ExactRow[],
+  grading: () => Multigrading,
   budget: Budget,
 ): PairCheck {
   const { pairs, divisors } = pairsOf(table, rows);
-  const matrices = new SymbolicPreprocessing(table);
-  const arithmetic = exactArithmetic();
+  const matrices = new MatrixReduction(table, exactArithmetic(), grading, budget);
   const total = pairs.size;
   let reduced = 0;
   while (pairs.size > 0) {
     budget.spend(() => `reducing S-pair ${reduced + 1} of ${total}`);
     const request = matrixOfPairs(table, pairs.take(pairs.nextSugar), rows);
-    const matrix = matrices.build(request, rows, divisors, budget);
-    const [remainder] = arithmetic.eliminate(matrix, rows, "independent", budget);
+    const remainders = matrices.reduce(request, rows, divisors, "independent");
     reduced += request.rows.length;
-    if (remainder !== undefined) {
-      const { columns, element } = matrix.rows[remainder.source] as MatrixRow;
-      const partner = matrix.pivots[columns[0] as number] as MatrixRow;
+    const failures = remainders.map(({ row, source }) => {
+      const { element, lead } = located(table, rows, request.rows[source] as Multiple);
+      return { row, element, lead };
+    });
+    const [failure] = failures.sort((a, b) => table.compare(a.lead, b.lead));
+    if (failure !== undefined) {
+      const { row, element, lead } = failure;
+      const partner = request.pivots
+        .map((pivot) => located(table, rows, pivot))
+        .find((pivot) => pivot.lead === lead) as Located;
       return {
-        failing: { first: partner.element, second: element, remainder: remainder.row },
+        failing: { first: partner.element, second: element, remainder: row },
         pairs: reduced,
       };
     }
@@ -59,11 +67,26 @@ export function checkPairs(
   return { failing: undefined, pairs: reduced };
 }
 
+interface Located {
+  readonly element: number;
+  readonly lead: MonomialId;
+}
+
+function located(
+  table: MonomialTable,
+  rows: readonly ExactRow[],
+  { element, multiplier }: Multiple,
+): Located {
+  const lead = leadingMonomial(rows[element] as ExactRow);
+  return { element, lead: table.product(multiplier, lead) };
+}
+
 /** Does every one of the polynomials reduce to zero by the basis, exactly? @throws LimitReached */
 export function reduceToZero(
   table: MonomialTable,
   polynomials: readonly ExactRow[],
   basis: readonly ExactRow[],
+  grading: () => Multigrading,
   budget: Budget,
 ): boolean {
   const elements = [...basis, ...polynomials];
@@ -72,13 +95,8 @@ export function reduceToZero(
     divisors.add(k, leadingMonomial(row));
   });
   const rows = polynomials.map((_, k) => ({ element: basis.length + k, multiplier: table.one }));
-  const matrix = new SymbolicPreprocessing(table).build(
-    { rows, pivots: [] },
-    elements,
-    divisors,
-    budget,
-  );
-  return exactArithmetic().eliminate(matrix, elements, "independent", budget).length === 0;
+  const matrices = new MatrixReduction(table, exactArithmetic(), grading, budget);
+  return matrices.reduce({ rows, pivots: [] }, elements, divisors, "independent").length === 0;
 }
 
 /* Smallest leading monomials first, so that redundant elements drop out of later pairs at once. */

@@ -6,6 +6,7 @@ import { type Budget, type Undecided, withinBudget } from "../outcomes/budget.js
 import type { Exponents } from "../polynomials/exponents.js";
 import { type MonomialIdeal, monomialIdeal } from "../polynomials/monomial-ideal.js";
 import { MonomialTable } from "../polynomials/monomial-table.js";
+import { finestGradingLater } from "../polynomials/multigrading.js";
 import { isZero, type Polynomial } from "../polynomials/polynomial.js";
 import type { TermOrder } from "../polynomials/term-order.js";
 import { exactRow, leadingMonomial, monicPolynomial } from "./rows.js";
@@ -48,7 +49,12 @@ export function verifyGenerators(
     const table = new MonomialTable(order);
     const indices = generators.flatMap((f, k) => (isZero(f) ? [] : [k]));
     const rows = indices.map((k) => exactRow(table, generators[k] as Polynomial));
-    const { failing, pairs } = checkPairs(table, rows, budget);
+    const { failing, pairs } = checkPairs(
+      table,
+      rows,
+      finestGradingLater(indices.map((k) => generators[k] as Polynomial)),
+      budget,
+    );
     const leads = rows.map((row) => table.exponents(leadingMonomial(row)));
     const facts: VerificationFacts = {
       kind: "verification",

@@ -28,6 +28,9 @@ interface Run {
   readonly texts: string[];
 }
 
+/** One block, no limits. */
+const whole = { grading: () => ({ weights: [] }), budget: unlimited() };
+
 function images(table: MonomialTable, generators: readonly Polynomial[], p: number): ModularRow[] {
   const field = primeField(p);
   return generators
@@ -43,8 +46,8 @@ function fullRun(
   const table = new MonomialTable(order);
   const inputs = images(table, generators, p);
   const arithmetic = modularArithmetic(primeField(p));
-  const { basis, trace } = growBasis(table, inputs, arithmetic, unlimited());
-  const rows = reduceBasis(table, basis, arithmetic, unlimited());
+  const { basis, trace } = growBasis({ table, inputs, arithmetic, ...whole });
+  const rows = reduceBasis({ table, inputs, arithmetic, ...whole }, basis);
   return {
     table,
     inputs,
@@ -73,8 +76,8 @@ describe("the F4 loop", () => {
         const table = new MonomialTable(order);
         const inputs = generators.filter((f) => !isZero(f)).map((f) => exactRow(table, f));
         const arithmetic = exactArithmetic();
-        const { basis } = growBasis(table, inputs, arithmetic, unlimited());
-        const rows = reduceBasis(table, basis, arithmetic, unlimited());
+        const { basis } = growBasis({ table, inputs, arithmetic, ...whole });
+        const rows = reduceBasis({ table, inputs, arithmetic, ...whole }, basis);
         const found = rows.map((row) => monicPolynomial(r, table, row));
         expect(termSets(found)).toEqual(termSets(reducedBasis(generators, order)));
       }),
@@ -99,12 +102,17 @@ describe("the F4 loop", () => {
     const graded = orderOf((generators[0] as Polynomial).ring, "graded revlex");
     const table = new MonomialTable(graded);
     const first = modularArithmetic(primeField(67108859));
-    const { trace } = growBasis(table, images(table, generators, 67108859), first, unlimited());
+    const { trace } = growBasis({
+      table,
+      inputs: images(table, generators, 67108859),
+      arithmetic: first,
+      ...whole,
+    });
     const second = modularArithmetic(primeField(32003));
     const inputs = images(table, generators, 32003);
-    const replayed = replayTrace(table, inputs, trace, second, unlimited());
+    const replayed = replayTrace({ table, inputs, arithmetic: second, ...whole }, trace);
     if (replayed === undefined) throw new Error("expected the replay to succeed");
-    const rows = reduceBasis(table, replayed, second, unlimited());
+    const rows = reduceBasis({ table, inputs, arithmetic: second, ...whole }, replayed);
     expect(rows).toHaveLength(20);
     expect(modularTexts(table, graded, 32003, rows)).toEqual(
       fullRun(generators, graded, 32003).texts,
@@ -116,14 +124,21 @@ describe("the F4 loop", () => {
     const generators = polynomials(r, ["7*x + y", "x*z + y^2"]);
     const table = new MonomialTable(order);
     const lucky = modularArithmetic(primeField(101));
-    const { trace } = growBasis(table, images(table, generators, 101), lucky, unlimited());
+    const { trace } = growBasis({
+      table,
+      inputs: images(table, generators, 101),
+      arithmetic: lucky,
+      ...whole,
+    });
     const unlucky = polynomials(r, ["y", "x*z + y^2"]);
     const replayed = replayTrace(
-      table,
-      images(table, unlucky, 7),
+      {
+        table,
+        inputs: images(table, unlucky, 7),
+        arithmetic: modularArithmetic(primeField(7)),
+        ...whole,
+      },
       trace,
-      modularArithmetic(primeField(7)),
-      unlimited(),
     );
     expect(replayed).toBeUndefined();
   });
