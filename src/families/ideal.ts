@@ -15,7 +15,8 @@ export interface GeneratingSet {
   /** One line for `--help` and reports. */
   readonly description: string;
   /**
-   * The generators: non-zero and distinct; made on demand, since large families have many.
+   * The generators, made on demand since large families have many. A family's are non-zero and distinct;
+   * those of a problem file are as typed, so that positions in witnesses are positions in the file.
    * @throws LimitReached
    */
   polynomials(budget?: Budget): readonly Polynomial[];

@@ -20,7 +20,7 @@ import { cornerBoundsIdeal } from "../families/corner-table-ideal.js";
 import type { GeneratingSet, Ideal } from "../families/ideal.js";
 import { readFamilyIdeal } from "../families/registry.js";
 import { type InputFault, quote, type Reading, read } from "../outcomes/input-fault.js";
-import { isZero, type Polynomial } from "../polynomials/polynomial.js";
+import type { Polynomial } from "../polynomials/polynomial.js";
 import type { PolynomialRing } from "../polynomials/polynomial-ring.js";
 import { readPolynomial } from "../polynomials/reading.js";
 import type { TermOrder } from "../polynomials/term-order.js";
@@ -135,7 +135,7 @@ function declaredIdeal(source: YamlSource, shape: ProblemShape): Ideal {
       {
         kind: "given",
         description: "the polynomials of the problem",
-        polynomials: () => polynomials.filter((f) => !isZero(f)),
+        polynomials: () => polynomials,
       },
     ],
     defaultOrder: "graded revlex",
