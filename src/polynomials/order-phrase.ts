@@ -34,8 +34,8 @@ import { type ReadingPath, readAllLines } from "./reading-path.js";
 import { type TermOrder, variableBelowOne } from "./term-order.js";
 import { readingOf, TextFault } from "./text-fault.js";
 
-/** What orders look like, for messages. */
-export const ORDER_EXAMPLES =
+/* What orders look like, for messages. */
+const ORDER_EXAMPLES =
   '"lex from nw by rows", "revlex from se by columns", "graded revlex" or "plain lex"';
 
 const LISTED_ORDERS = '"graded revlex", "graded lex" or "plain lex"';

@@ -18,7 +18,7 @@ import {
   variableBelowOne,
 } from "./term-order.js";
 
-export { type MinorTerms, minorTerms } from "./minor-terms.js";
+export { minorTerms } from "./minor-terms.js";
 
 /** What decides at a cell: `lex`, the larger exponent is the larger monomial; `revlex`, the smaller. */
 export type Rule = "lex" | "revlex";
