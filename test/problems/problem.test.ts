@@ -35,7 +35,7 @@ ideal:
     expect(problem.ideal.name).toBe("curve.yaml");
     expect(problem.ideal.ring.variables).toEqual(["x", "y", "z"]);
     expect(problem.generators.kind).toBe("given");
-    expect(printed(problem)).toHaveLength(2);
+    expect(printed(problem)).toHaveLength(3);
     expect(printed(problem)[1]).toBe("3/2*x*z - 3/2*y^2");
     expect(problem.order.phrase).toBe("graded revlex");
     expect(problem.order.degreeFirst).toBe(true);
@@ -161,8 +161,8 @@ order: dual from nw by rows
   it("checks the grading only when there is one", () => {
     const polynomials = "ideal: {polynomials: [x^2 + y, 0]}";
     const graded = `variables: {names: [x, y], degrees: {x: [1], y: [2]}}\n${polynomials}`;
-    expect(printed(problemOf(graded))).toHaveLength(1);
-    expect(printed(problemOf(`variables: {names: [x, y]}\n${polynomials}`))).toHaveLength(1);
+    expect(printed(problemOf(graded))).toHaveLength(2);
+    expect(printed(problemOf(`variables: {names: [x, y]}\n${polynomials}`))).toHaveLength(2);
   });
 });
 
