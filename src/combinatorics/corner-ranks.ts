@@ -37,22 +37,64 @@ export function cornerSums(matrix: readonly (readonly number[])[]): CornerRanks 
 /**
  * The bounds that the others do not imply: a bound is implied when it is not below the size of its
  * submatrix, or when a submatrix with one line less or more (or any other bounded submatrix) forces it.
- * For permutations these are the bounds at the essential set.
+ * Of bounds that say the same the first stays. For permutations these are the bounds at the essential
+ * set. Linear in the size of the matrix and the number of bounds.
+ * @throws RangeError when a bound is on more lines than the matrix has.
  */
 export function essentialBounds(table: CornerRanks): CornerRanks {
-  const kept: RankBound[] = [];
-  const proper = table.bounds.filter((b) => b.rank < Math.min(b.rows, b.columns));
-  proper.forEach((bound, k) => {
-    const implied = proper.some(
-      (other, l) => l !== k && implies(other, bound) && (!implies(bound, other) || l < k),
+  const forced = forcedRanks(table);
+  const at = (rows: number, columns: number): number => forced[rows]?.[columns] ?? Infinity;
+  const said = new Set<string>();
+  const bounds = table.bounds.filter(({ rows, columns, rank }) => {
+    if (rank >= Math.min(rows, columns)) return false;
+    const fromOthers = Math.min(
+      at(rows - 1, columns) + 1,
+      at(rows, columns - 1) + 1,
+      at(rows + 1, columns),
+      at(rows, columns + 1),
     );
-    if (!implied) kept.push(bound);
+    if (rank > at(rows, columns) || rank >= fromOthers) return false;
+    const place = `${rows} ${columns}`;
+    if (said.has(place)) return false;
+    said.add(place);
+    return true;
   });
-  return { ...table, bounds: kept };
+  return { ...table, bounds };
 }
 
-/* A submatrix of rank ≤ r gains at most one rank a line, and loses none by dropping lines. */
-function implies(known: RankBound, bound: RankBound): boolean {
-  const more = Math.max(0, bound.rows - known.rows) + Math.max(0, bound.columns - known.columns);
-  return known.rank + more <= bound.rank;
+/**
+ * The largest rank that the bounds together leave to every corner submatrix, with 0 … m rows and 0 … n
+ * columns. A submatrix of rank ≤ r gains at most one rank a line, and loses none by dropping lines; so
+ * each bound spreads along the columns and then along the rows, down at one a line and back at no cost.
+ */
+function forcedRanks(table: CornerRanks): number[][] {
+  const forced = Array.from({ length: table.rows + 1 }, (_, i) =>
+    Array.from({ length: table.columns + 1 }, (_, j) => (i === 0 || j === 0 ? 0 : Infinity)),
+  );
+  for (const { rows, columns, rank } of table.bounds) {
+    const row = forced[rows];
+    const known = row?.[columns];
+    if (row === undefined || known === undefined) {
+      throw new RangeError(
+        `expected bounds within ${table.rows}×${table.columns}, got one on ${rows}×${columns}`,
+      );
+    }
+    row[columns] = Math.min(known, rank);
+  }
+  for (const row of forced) spread(row);
+  for (let j = 0; j <= table.columns; j++) {
+    const column = forced.map((row) => row[j] as number);
+    spread(column);
+    for (const [i, row] of forced.entries()) row[j] = column[i] as number;
+  }
+  return forced;
+}
+
+function spread(ranks: number[]): void {
+  for (let k = 1; k < ranks.length; k++) {
+    ranks[k] = Math.min(ranks[k] as number, (ranks[k - 1] as number) + 1);
+  }
+  for (let k = ranks.length - 1; k > 0; k--) {
+    ranks[k - 1] = Math.min(ranks[k - 1] as number, ranks[k] as number);
+  }
 }

@@ -5,9 +5,9 @@ import { inverse, type Permutation } from "./permutation.js";
 /** `r_w(i,j) = #{a ≤ i : w(a) ≤ j}` as a table with rows and columns 0 … n. */
 export function rankTable(w: Permutation): readonly (readonly number[])[] {
   const table = [new Array<number>(w.length + 1).fill(0)];
-  w.forEach((value, i) => {
+  for (const [i, value] of w.entries()) {
     table.push((table[i] as number[]).map((rank, j) => rank + (value <= j ? 1 : 0)));
-  });
+  }
   return table;
 }
 
@@ -27,9 +27,11 @@ export function diagram(w: Permutation): readonly Cell[] {
  */
 export function essentialSet(w: Permutation): readonly Cell[] {
   const cells = diagram(w);
-  const has = (row: number, column: number): boolean =>
-    cells.some((c) => c.row === row && c.column === column);
-  return cells.filter(({ row, column }) => !has(row + 1, column) && !has(row, column + 1));
+  const keyOf = (row: number, column: number): number => row * (w.length + 1) + column;
+  const inside = new Set(cells.map(({ row, column }) => keyOf(row, column)));
+  return cells.filter(
+    ({ row, column }) => !inside.has(keyOf(row + 1, column)) && !inside.has(keyOf(row, column + 1)),
+  );
 }
 
 /** The dominant part: the cells of D(w) where r_w = 0. */

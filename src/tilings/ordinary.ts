@@ -6,59 +6,74 @@
  * everything before it; only the columns to its right are free.
  */
 import { inverse, type Permutation } from "../combinatorics/permutation.js";
-import type { Cut, RowTransfer } from "./row-transfer.js";
+import type { Cut, RowMove, RowTransfer } from "./row-transfer.js";
+import type { Tile } from "./tiling.js";
+
+/** May the pipe h, running to the left, cross the pipe v from above? */
+type CrossingRule = (h: number, v: number) => boolean;
+
+/** A row that is being filled, from the right to the column where a pipe leaves. */
+interface OpenRow extends RowMove {
+  readonly cut: Cut;
+  /** The column in which the pipe that leaves turns left. */
+  readonly exit: number;
+  readonly tiles: Tile[];
+  readonly next: number[];
+  /** The pipe that arrives in each column from the right. */
+  readonly arriving: number[];
+}
 
 /** The rows of the reduced ordinary pipe dreams of w, top row first. */
 export function ordinaryTransfer(w: Permutation): RowTransfer {
   const leaves = inverse(w);
-  const n = w.length;
-  const mayCross = (h: number, v: number): boolean =>
+  const mayCross: CrossingRule = (h, v) =>
     v < h && (leaves[h - 1] as number) < (leaves[v - 1] as number);
   return {
-    size: n,
+    size: w.length,
     start: w.map((_, j) => j + 1),
-    *moves(cut, step) {
-      const last = cut.length - 1;
-      const exit = cut.indexOf(w[step] as number);
-      const margin = ".".repeat(step);
-      for (const part of freeColumns(cut, exit, last, mayCross)) {
-        const tiles = "+".repeat(exit) + (exit === last ? "" : "%") + part.tiles;
-        const next =
-          exit === last
-            ? cut.slice(0, last)
-            : [...cut.slice(0, exit), part.arriving, ...part.below];
-        yield { tiles: `${tiles}J${margin}`, next };
-      }
-    },
+    moves: (cut, step) => rowsBelow(cut, cut.indexOf(w[step] as number), w.length, mayCross),
   };
 }
 
-/** The tiles right of the exit column, the pipe that arrives at it, and the pipes below the others. */
-interface FreePart {
-  readonly tiles: string;
-  readonly arriving: number;
-  readonly below: Cut;
-}
-
-function* freeColumns(
+function* rowsBelow(
   cut: Cut,
   exit: number,
-  last: number,
-  mayCross: (h: number, v: number) => boolean,
-): Generator<FreePart, void> {
-  function* leftOf(
-    column: number,
-    h: number,
-    tiles: string,
-    below: Cut,
-  ): Generator<FreePart, void> {
-    if (column <= exit) {
-      yield { tiles, arriving: h, below };
-      return;
-    }
-    const v = cut[column] as number;
-    if (mayCross(h, v)) yield* leftOf(column - 1, h, `+${tiles}`, [v, ...below]);
-    yield* leftOf(column - 1, v, `%${tiles}`, [h, ...below]);
+  size: number,
+  mayCross: CrossingRule,
+): Generator<RowMove, void> {
+  const last = cut.length - 1;
+  const tiles = Array.from({ length: size }, (_, j): Tile => (j < exit ? "+" : "."));
+  tiles[exit] = "%";
+  tiles[last] = "J";
+  const row: OpenRow = { cut, exit, tiles, next: cut.slice(0, last), arriving: cut.slice(1) };
+  let column: number | undefined = last - 1;
+  while (column !== undefined) {
+    fillLeftwards(row, column, mayCross);
+    yield row;
+    column = bumpLeftmostCross(row);
   }
-  yield* leftOf(last - 1, cut[last] as number, "", []);
+}
+
+/* Fills the free columns from one on: crosses wherever they are allowed. */
+function fillLeftwards(row: OpenRow, from: number, mayCross: CrossingRule): void {
+  const { cut, exit, tiles, next, arriving } = row;
+  for (let column = from; column > exit; column--) {
+    const h = arriving[column] as number;
+    const v = cut[column] as number;
+    const crosses = mayCross(h, v);
+    tiles[column] = crosses ? "+" : "%";
+    next[column] = crosses ? v : h;
+    arriving[column - 1] = crosses ? h : v;
+  }
+  if (exit < next.length) next[exit] = arriving[exit] as number;
+}
+
+/* Makes the leftmost free cross a bump; returns the column after it, from which the row is to be filled. */
+function bumpLeftmostCross({ cut, exit, tiles, next, arriving }: OpenRow): number | undefined {
+  const column = tiles.indexOf("+", exit + 1);
+  if (column === -1) return undefined;
+  tiles[column] = "%";
+  next[column] = arriving[column] as number;
+  arriving[column - 1] = cut[column] as number;
+  return column - 1;
 }
