@@ -53,5 +53,5 @@ export function placeAt(text: string, offset: number): Place {
   const lineStart = before.lastIndexOf("\n") + 1;
   let line = 1;
   for (let i = before.indexOf("\n"); i !== -1; i = before.indexOf("\n", i + 1)) line++;
-  return { line, column: offset - lineStart + 1 };
+  return { line, column: before.length - lineStart + 1 };
 }
