@@ -92,12 +92,14 @@ function byRadical(
     group.members.push(irreducible);
     groups.set(key, group);
   }
-  const primes = [...groups.values()].map((group) => new Set(group.prime));
-  return [...groups.values()].map(({ prime, members }, k): PrimaryComponent => {
-    const own = primes[k] as ReadonlySet<VariableIndex>;
-    const embedded = primes.some(
-      (other) => other.size < own.size && [...other].every((v) => own.has(v)),
-    );
+  // By size, a prime that contains another associated one contains a minimal one seen before.
+  const minimal: MonomialPrime[] = [];
+  const bySize = [...groups.values()].sort((a, b) => a.prime.length - b.prime.length);
+  return bySize.map(({ prime, members }): PrimaryComponent => {
+    budget.spend(() => `multiplicities of ${bySize.length} components`);
+    const own = new Set(prime);
+    const embedded = minimal.some((other) => other.every((v) => own.has(v)));
+    if (!embedded) minimal.push(prime);
     return {
       prime,
       codimension: prime.length,
