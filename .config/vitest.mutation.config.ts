@@ -9,7 +9,9 @@ export default defineConfig({
   root: fileURLToPath(new URL("..", import.meta.url)),
   cacheDir: "node_modules/.vite",
   test: {
-    include: ["test/{arithmetic,components,groebner,kernel,laws,outcomes,polynomials}/**/*.test.ts"],
+    include: [
+      "test/{arithmetic,components,groebner,kernel,laws,outcomes,polynomials}/**/*.test.ts",
+    ],
     exclude: ["test/**/*{fuzz,bounds,hostile,reference-ideals}*.test.ts"],
     allowOnly: false,
     testTimeout: 30_000,

@@ -11,12 +11,6 @@ export interface Rational {
   readonly denominator: bigint;
 }
 
-/** An integer known modulo a product of primes: `0 ≤ value < modulus`. */
-export interface ResidueClass {
-  readonly value: bigint;
-  readonly modulus: bigint;
-}
-
 /**
  * The factors with which many residues are joined: with `m` coprime to the prime p,
  * `join(a, b) ≡ a (mod m)` and `≡ b (mod p)`, in 0 ≤ · < m·p.

@@ -72,7 +72,7 @@ export function decideGroebner(
 }
 
 /** Size and largest degree of a reduced basis, from the monomials of its elements. */
-export function basisSize(elements: readonly (readonly Uint16Array[])[]): BasisSize {
+function basisSize(elements: readonly (readonly Uint16Array[])[]): BasisSize {
   const degrees = elements.flatMap((monomials) => monomials.map(totalDegree));
   return { size: elements.length, maxDegree: degrees.reduce((a, b) => Math.max(a, b), 0) };
 }

@@ -61,7 +61,7 @@ export function matchTilings(question: TilingsQuestion, budget: Budget): Tilings
 }
 
 /** The variables of the ring's first matrix that vanish on the subspace of a tiling. */
-export function vanishingVariables(
+function vanishingVariables(
   ring: PolynomialRing,
   kind: TilingKind,
   tiling: Tiling,

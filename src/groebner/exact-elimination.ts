@@ -67,8 +67,7 @@ function reduceInDoubles(
   let bound = row.height;
   for (let column = from; column < accumulator.length; column++) {
     const value = accumulator[column] as number;
-    if (value === 0) continue;
-    const pivot = pivots[column];
+    const pivot = value === 0 ? undefined : pivots[column];
     if (pivot === undefined) continue;
     if (pivot.small === undefined) return undefined;
     const lead = pivot.small[0] as number;
@@ -76,23 +75,31 @@ function reduceInDoubles(
     const scale = lead / common;
     const multiplier = value / common;
     const growth = Math.abs(multiplier) * pivot.height;
-    if (bound * scale + growth > EXACT_LIMIT) {
-      bound = largestFrom(accumulator, start);
-      if (bound * scale + growth > EXACT_LIMIT) return undefined;
-    }
+    if (bound * scale + growth > EXACT_LIMIT) bound = largestFrom(accumulator, start);
     bound = bound * scale + growth;
-    if (scale !== 1) {
-      for (let c = start; c < accumulator.length; c++) {
-        accumulator[c] = (accumulator[c] as number) * scale;
-      }
-    }
-    const { columns, small } = pivot;
-    for (let k = 0; k < columns.length; k++) {
-      const c = columns[k] as number;
-      accumulator[c] = (accumulator[c] as number) - multiplier * (small[k] as number);
-    }
+    if (bound > EXACT_LIMIT) return undefined;
+    if (scale !== 1) multiplyFrom(accumulator, start, scale);
+    subtractMultiple(accumulator, pivot.columns, pivot.small, multiplier);
   }
   return { reduced: gather(start, accumulator.length, (c) => BigInt(accumulator[c] as number)) };
+}
+
+function multiplyFrom(accumulator: Float64Array, start: number, factor: number): void {
+  for (let c = start; c < accumulator.length; c++) {
+    accumulator[c] = (accumulator[c] as number) * factor;
+  }
+}
+
+function subtractMultiple(
+  accumulator: Float64Array,
+  columns: Int32Array,
+  coefficients: Float64Array,
+  multiplier: number,
+): void {
+  for (let k = 0; k < columns.length; k++) {
+    const c = columns[k] as number;
+    accumulator[c] = (accumulator[c] as number) - multiplier * (coefficients[k] as number);
+  }
 }
 
 function reduceInBigIntegers(
