@@ -8,6 +8,7 @@ export default defineConfig({
   test: {
     include: ["test/**/*.test.ts"],
     exclude: ["test/slow/**"],
+    setupFiles: ["test/support/fixed-seed.ts"],
     allowOnly: false,
     testTimeout: 30_000,
     hookTimeout: 60_000,

@@ -13,6 +13,7 @@ export default defineConfig({
       "test/{arithmetic,components,groebner,kernel,laws,outcomes,polynomials}/**/*.test.ts",
     ],
     exclude: ["test/**/*{fuzz,bounds,hostile,reference-ideals}*.test.ts"],
+    setupFiles: ["test/support/fixed-seed.ts"],
     allowOnly: false,
     testTimeout: 30_000,
     hookTimeout: 60_000,
