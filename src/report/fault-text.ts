@@ -15,7 +15,9 @@ const EXCERPT_WIDTH = 100;
  */
 export function printFault(fault: InputFault): string {
   const { file, place, message, expected, excerpt } = fault;
-  const where = [file, place?.line, place?.column].filter((part) => part !== undefined).join(":");
+  // What was typed on the command line has no file: the caret alone shows the place.
+  const parts = file === undefined ? [] : [file, place?.line, place?.column];
+  const where = parts.filter((part) => part !== undefined).join(":");
   const lines = [`flatlimit: ${where === "" ? "" : `${where}: `}${message}`];
   if (place !== undefined && excerpt !== undefined) {
     const start = Math.max(0, place.column - 1 - EXCERPT_WIDTH / 2);
