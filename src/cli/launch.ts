@@ -23,14 +23,11 @@ export function launch(request: JobRequest): Promise<number> {
     resourceLimits: { maxOldGenerationSizeMb: Math.max(heap, 16) },
   });
   let stage = "starting";
-  const showsProgress = !request.quiet && process.stderr.isTTY === true;
-  const clearProgress = (): void => {
-    if (showsProgress) process.stderr.write("\r\u001b[K");
-  };
+  const progress = progressLine(request, started);
   return new Promise((resolve) => {
     const finish = (status: number): void => {
       clearTimeout(overrun);
-      clearProgress();
+      progress.clear();
       resolve(status);
       void worker.terminate();
     };
@@ -53,7 +50,7 @@ export function launch(request: JobRequest): Promise<number> {
       finish(EXIT.undecided);
     };
     const interrupt = (status: number) => (): void => {
-      clearProgress();
+      progress.clear();
       say(2, `flatlimit: interrupted after ${elapsed()}: ${stage}`);
       finish(status);
     };
@@ -69,10 +66,7 @@ export function launch(request: JobRequest): Promise<number> {
         return;
       }
       stage = message.stage;
-      if (showsProgress) {
-        const width = (process.stderr.columns ?? 80) - 1;
-        process.stderr.write(`\r\u001b[K${`${elapsed()}  ${stage}`.slice(0, width)}`);
-      }
+      progress.show(stage);
     });
     worker.on("error", (error: Error & { code?: string }) => {
       if (error.code === "ERR_WORKER_OUT_OF_MEMORY") undecided(`the memory was used up, ${stage}`);
@@ -82,6 +76,37 @@ export function launch(request: JobRequest): Promise<number> {
       }
     });
   });
+}
+
+/** Milliseconds between two lines of progress where they cannot overwrite each other. */
+const LINE_INTERVAL = 1000;
+
+/** Progress on standard error: one line that overwrites itself on a terminal, a line a second elsewhere. */
+function progressLine(
+  { quiet, progress }: JobRequest,
+  started: number,
+): { show(stage: string): void; clear(): void } {
+  const { stderr } = process;
+  let last = started;
+  const timed = (stage: string): string =>
+    `${((performance.now() - started) / 1000).toFixed(1)} s  ${stage}`;
+  if (quiet || (stderr.isTTY !== true && !progress)) {
+    return { show: () => undefined, clear: () => undefined };
+  }
+  if (stderr.isTTY === true) {
+    return {
+      show: (stage) => stderr.write(`\r\u001b[K${timed(stage).slice(0, stderr.columns - 1)}`),
+      clear: () => stderr.write("\r\u001b[K"),
+    };
+  }
+  return {
+    show(stage) {
+      if (performance.now() - last < LINE_INTERVAL) return;
+      last = performance.now();
+      say(2, timed(stage));
+    },
+    clear: () => undefined,
+  };
 }
 
 function say(descriptor: 1 | 2, line: string): void {

@@ -12,13 +12,14 @@ const UNITS: ReadonlyMap<string, number> = new Map([
   ["GB", 1e9],
 ]);
 
-/** Adds `--json`, `--seconds`, `--memory`, `--quiet` to a command. */
+/** Adds `--json`, `--seconds`, `--memory`, `--quiet`, `--progress` to a command. */
 export function withCommonOptions(command: Command): Command {
   return command
     .option("--json", "print one JSON object and nothing else")
     .option("--seconds <number>", "stop as undecided after this many seconds", readSeconds)
     .option("--memory <size>", "stop as undecided past this much memory, such as 2GiB", readMemory)
-    .option("--quiet", "no progress on standard error");
+    .option("--quiet", "no progress on standard error")
+    .option("--progress", "progress on standard error even where it is no terminal");
 }
 
 /** Runs a job with the options that commander read, and sets the exit status. */
@@ -27,13 +28,14 @@ export async function runJob(
   subject: string,
   options: JobSettings & Partial<CommonOptions>,
 ): Promise<void> {
-  const { json = false, quiet = false, seconds, memory, ...settings } = options;
+  const { json = false, quiet = false, progress = false, seconds, memory, ...settings } = options;
   process.exitCode = await launch({
     job,
     subject,
     settings,
     json,
     quiet,
+    progress,
     ...(seconds === undefined ? {} : { seconds }),
     ...(memory === undefined ? {} : { memory }),
   });

@@ -7,6 +7,8 @@ export type JobName = "verify" | "limit" | "match" | "tilings";
 export interface CommonOptions {
   readonly json: boolean;
   readonly quiet: boolean;
+  /** Progress even where standard error is no terminal. */
+  readonly progress: boolean;
   /** Wall-clock seconds. */
   readonly seconds?: number;
   /** Bytes. */

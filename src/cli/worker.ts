@@ -46,9 +46,21 @@ function statusOf(error: unknown): number {
       writeAll(2, `${printFault(error.fault)}\n`);
       return EXIT.badInput;
     }
+    if (isOutOfMemory(error)) {
+      writeAll(2, "flatlimit: undecided: a table grew past what memory can hold\n");
+      return EXIT.undecided;
+    }
     writeAll(2, `flatlimit: internal fault: ${error instanceof Error ? error.message : error}\n`);
   } catch (closed) {
     if (!(closed instanceof OutputClosed)) throw closed;
   }
   return EXIT.fault;
+}
+
+/* What the platform throws when an array or map cannot grow further. */
+function isOutOfMemory(error: unknown): boolean {
+  return (
+    error instanceof RangeError &&
+    /allocation failed|Invalid (typed )?array length|maximum size exceeded/.test(error.message)
+  );
 }
