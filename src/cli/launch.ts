@@ -65,6 +65,10 @@ export function launch(request: JobRequest): Promise<number> {
         finish(message.status);
         return;
       }
+      if (message.kind === "undecided") {
+        undecided(`${message.reason}, ${stage}`);
+        return;
+      }
       stage = message.stage;
       progress.show(stage);
     });

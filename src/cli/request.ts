@@ -38,7 +38,9 @@ export interface JobSettings {
 /** Messages from the worker. */
 export type WorkerMessage =
   | { readonly kind: "progress"; readonly stage: string }
-  | { readonly kind: "done"; readonly status: number };
+  | { readonly kind: "done"; readonly status: number }
+  /** The job could not go on and has written nothing; the main thread says so. */
+  | { readonly kind: "undecided"; readonly reason: string };
 
 /** Exit statuses of the program. */
 export const EXIT = {

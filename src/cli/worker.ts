@@ -9,9 +9,9 @@ import { EXIT, type JobRequest, type WorkerMessage } from "./request.js";
 const port = parentPort;
 if (port === null) throw new TypeError("expected to run in a worker thread");
 const send = (message: WorkerMessage): void => port.postMessage(message);
-send({ kind: "done", status: await run(workerData as JobRequest) });
+send(await run(workerData as JobRequest));
 
-async function run(request: JobRequest): Promise<number> {
+async function run(request: JobRequest): Promise<WorkerMessage> {
   const output = bufferedOutput();
   try {
     const { job } = (await import(`./jobs/${request.job}.js`)) as { job: Job };
@@ -24,9 +24,12 @@ async function run(request: JobRequest): Promise<number> {
       budget: budgetOf(request),
     });
     output.flush();
-    return status;
+    return { kind: "done", status };
   } catch (error) {
-    return statusOf(error);
+    if (isOutOfMemory(error)) {
+      return { kind: "undecided", reason: "a table grew past what memory can hold" };
+    }
+    return { kind: "done", status: statusOf(error) };
   }
 }
 
@@ -45,10 +48,6 @@ function statusOf(error: unknown): number {
     if (error instanceof BadInput) {
       writeAll(2, `${printFault(error.fault)}\n`);
       return EXIT.badInput;
-    }
-    if (isOutOfMemory(error)) {
-      writeAll(2, "flatlimit: undecided: a table grew past what memory can hold\n");
-      return EXIT.undecided;
     }
     writeAll(2, `flatlimit: internal fault: ${error instanceof Error ? error.message : error}\n`);
   } catch (closed) {
