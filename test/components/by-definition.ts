@@ -7,7 +7,7 @@ import { type MonomialIdeal, monomialIdeal } from "../../src/polynomials/monomia
 import { boxBelow, contains, lcmOfGenerators } from "./samples.js";
 
 /** The number of monomials outside the ideal in each degree up to a bound, one by one. */
-export function hilbertFunction(ideal: MonomialIdeal, upTo: number): number[] {
+function hilbertFunction(ideal: MonomialIdeal, upTo: number): number[] {
   const counts = new Array<number>(upTo + 1).fill(0);
   const exponents = new Uint16Array(ideal.variableCount);
   const fill = (v: number, left: number): void => {

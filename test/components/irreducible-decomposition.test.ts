@@ -5,6 +5,7 @@ import {
   irreducibleDecomposition,
 } from "../../src/components/irreducible-decomposition.js";
 import { startBudget, unlimited } from "../../src/outcomes/budget.js";
+import { totalDegree } from "../../src/polynomials/exponents.js";
 import { type MonomialIdeal, monomialIdeal } from "../../src/polynomials/monomial-ideal.js";
 import { irreduciblesBySplitting } from "./by-definition.js";
 import {
@@ -17,6 +18,7 @@ import {
   randomRenaming,
   renamed,
   renamedIdeal,
+  treeIdeal,
 } from "./samples.js";
 
 const irreduciblesOf = (ideal: MonomialIdeal) => irreducibleDecomposition(ideal, unlimited());
@@ -92,10 +94,10 @@ describe("known irreducible decompositions", () => {
 
   it("of a power of the maximal ideal counts compositions", () => {
     // (x_1, …, x_n)^d has the socle in degree d−1, so C(n+d−2, n−1) components (from memory).
-    const generators = [...boxBelow([4, 4, 4])].filter((m) => sum(m) === 4);
+    const generators = [...boxBelow([4, 4, 4])].filter((m) => totalDegree(m) === 4);
     const components = irreduciblesOf(monomialIdeal(3, generators));
     expect(components).toHaveLength(10);
-    expect(new Set(components.map(sum))).toEqual(new Set([4 + 3 - 1]));
+    expect(new Set(components.map(totalDegree))).toEqual(new Set([4 + 3 - 1]));
   });
 
   it("of the permutohedron ideal has a component for every set of variables", () => {
@@ -120,22 +122,9 @@ describe("known irreducible decompositions", () => {
   });
 });
 
-/* (Π_{s ∈ S} x_s)^(n−|S|+1) over the non-empty sets S of variables. */
-function treeIdeal(n: number): MonomialIdeal {
-  const sets = [...boxBelow(new Array<number>(n).fill(1))].filter((set) => sum(set) > 0);
-  return monomialIdeal(
-    n,
-    sets.map((set) => set.map((e) => e * (n - sum(set) + 1))),
-  );
-}
-
 /* The vectors with the entries 1 … n in all orders. */
 function permutationsAsExponents(n: number): Uint16Array[] {
   return [...boxBelow(new Array<number>(n).fill(n))].filter(
     (b) => new Set(b).size === n && !b.includes(0),
   );
-}
-
-function sum(exponents: Uint16Array): number {
-  return exponents.reduce((total, e) => total + e, 0);
 }

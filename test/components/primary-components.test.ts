@@ -28,6 +28,7 @@ import {
   randomMonomialIdeal,
   randomRenaming,
   renamedIdeal,
+  treeIdeal,
   variables,
 } from "./samples.js";
 
@@ -256,13 +257,4 @@ function isPrimaryTo({ generators }: MonomialIdeal, prime: readonly number[]): b
   const inside = supports.every((support) => support.every((v) => prime.includes(v)));
   const powers = supports.filter((support) => support.length === 1).map(([v]) => v);
   return inside && prime.every((v) => powers.includes(v));
-}
-
-/* (Π_{s ∈ S} x_s)^(n−|S|+1) over the non-empty sets S of variables. */
-function treeIdeal(n: number): MonomialIdeal {
-  const sets = [...boxBelow(new Array<number>(n).fill(1))].slice(1);
-  return monomialIdeal(
-    n,
-    sets.map((set) => set.map((e) => e * (n - set.reduce((size, b) => size + b, 0) + 1))),
-  );
 }

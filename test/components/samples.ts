@@ -1,6 +1,6 @@
 /** Monomial ideals for the tests of components: written as text, random, and from tables of the trade. */
 import fc from "fast-check";
-import { dividesExponents, type Exponents } from "../../src/polynomials/exponents.js";
+import { dividesExponents, type Exponents, totalDegree } from "../../src/polynomials/exponents.js";
 import { type MonomialIdeal, monomialIdeal } from "../../src/polynomials/monomial-ideal.js";
 import type { VariableIndex } from "../../src/polynomials/polynomial-ring.js";
 
@@ -81,7 +81,7 @@ export function contains(ideal: MonomialIdeal, m: Exponents): boolean {
 }
 
 /** All subsets of 0 … n−1 with so many members, each ascending. */
-export function subsetsOfSize(n: number, size: number): number[][] {
+function subsetsOfSize(n: number, size: number): number[][] {
   if (size === 0) return [[]];
   return subsetsOfSize(n, size - 1).flatMap((subset) => {
     const start = (subset.at(-1) ?? -1) + 1;
@@ -132,4 +132,13 @@ export function complementsOfCyclicFacets(n: number, d: number): number[][] {
       );
     })
     .map((facet) => all.filter((v) => !facet.includes(v)));
+}
+
+/** The tree ideal: (Π_{s ∈ S} x_s)^(n−|S|+1) over the non-empty sets S of n variables. */
+export function treeIdeal(n: number): MonomialIdeal {
+  const sets = [...boxBelow(new Array<number>(n).fill(1))].slice(1);
+  return monomialIdeal(
+    n,
+    sets.map((set) => set.map((e) => e * (n - totalDegree(set) + 1))),
+  );
 }
