@@ -13,7 +13,7 @@ import {
   unlimited,
 } from "../dist/index.js";
 
-/** @import { Ideal, Polynomial, Reading } from "../dist/index.js" */
+/** @import { Polynomial, Reading } from "../dist/index.js" */
 
 /**
  * @typedef {object} Workload

@@ -33,7 +33,7 @@ export function schubertQuestion(
 }
 
 /** A result that was decided; a limit fails the test. */
-export function decided<T extends { readonly kind: string }>(outcome: T | Undecided): T {
+function decided<T extends { readonly kind: string }>(outcome: T | Undecided): T {
   if (outcome.kind === "undecided") throw new Error((outcome as Undecided).reason);
   return outcome as T;
 }
