@@ -2,9 +2,20 @@
 
 /** The greatest common divisor, never negative; gcd(0, 0) = 0. */
 export function gcd(a: bigint, b: bigint): bigint {
+  return interruptibleGcd(a, b, undefined);
+}
+
+/**
+ * The greatest common divisor of integers that may have a million bits, so that it takes half a million
+ * divisions; `spend` is called at every one and may throw.
+ */
+export function interruptibleGcd(a: bigint, b: bigint, spend: (() => void) | undefined): bigint {
   let x = a < 0n ? -a : a;
   let y = b < 0n ? -b : b;
-  while (y !== 0n) [x, y] = [y, x % y];
+  while (y !== 0n) {
+    spend?.();
+    [x, y] = [y, x % y];
+  }
   return x;
 }
 

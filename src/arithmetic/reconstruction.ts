@@ -30,7 +30,10 @@ export function remainderJoiner(m: bigint, p: number): (a: bigint, b: number) =>
  * one; it is unique then. Cost: one Euclidean algorithm.
  */
 export function rationalReconstruction(value: bigint, m: bigint): Rational | undefined {
-  const bound = integerSquareRoot(m / 2n);
+  return reconstructWithin(integerSquareRoot(m / 2n), value, m);
+}
+
+function reconstructWithin(bound: bigint, value: bigint, m: bigint): Rational | undefined {
   let [r0, r1] = [m, residue(value, m)];
   let [t0, t1] = [0n, 1n];
   while (r1 > bound) {
@@ -45,7 +48,8 @@ export function rationalReconstruction(value: bigint, m: bigint): Rational | und
 /**
  * Rational reconstruction of a list, each tried first with the common denominator found so far, which
  * costs one multiplication. Undefined as soon as one value has no reconstruction.
- * Result: numerators over one positive common denominator, without a common factor.
+ * Result: numerators over one positive common denominator, without a common factor: it is the least common
+ * multiple of denominators in lowest terms.
  */
 export function reconstructTogether(
   values: readonly bigint[],
@@ -57,13 +61,11 @@ export function reconstructTogether(
   for (const value of values) {
     const shifted = residue(value * denominator, m);
     const signed = shifted > m / 2n ? shifted - m : shifted;
-    let rational: Rational | undefined;
     if (absolute(signed) <= bound && denominator <= bound) {
-      const common = gcd(signed, denominator);
-      rational = { numerator: signed / common, denominator: denominator / common };
-    } else {
-      rational = rationalReconstruction(value, m);
+      found.push({ numerator: signed, denominator });
+      continue;
     }
+    const rational = reconstructWithin(bound, value, m);
     if (rational === undefined) return undefined;
     denominator *= rational.denominator / gcd(rational.denominator, denominator);
     found.push(rational);

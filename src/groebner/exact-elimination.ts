@@ -4,7 +4,7 @@
  * every entry below 2⁵³; when the bound gives out it starts again in big integers. The families here
  * have coefficients ±1, so nearly all their rows stay in doubles.
  */
-import { gcd } from "../arithmetic/integers.js";
+import { interruptibleGcd } from "../arithmetic/integers.js";
 import type { Budget } from "../outcomes/budget.js";
 import { type ColumnRow, monomialsOf, type RowArithmetic, reduceMatrix } from "./row-arithmetic.js";
 import { type ExactRow, primitiveRow } from "./rows.js";
@@ -114,40 +114,45 @@ function reduceInBigIntegers(
   for (let k = 0; k < row.columns.length; k++) {
     entries[row.columns[k] as number] = row.coefficients[k] as bigint;
   }
+  // Integers may grow to millions of bits, so that single operations take long: every one is accounted for.
+  const stage = (): string => `reducing a matrix of ${width} columns in big integers`;
+  const spend = (): void => budget.spend(stage);
   let scalings = 0;
   for (let column = from; column < width; column++) {
     const value = entries[column] as bigint;
     if (value === 0n) continue;
     const pivot = pivots[column];
     if (pivot === undefined) continue;
-    budget.spend(() => `reducing a matrix of ${width} columns in big integers`);
     const lead = pivot.coefficients[0] as bigint;
-    const common = gcd(value, lead);
+    const common = interruptibleGcd(value, lead, spend);
     const scale = lead / common;
     const multiplier = value / common;
     if (scale !== 1n) {
       for (let c = start; c < width; c++) {
-        if (entries[c] !== 0n) entries[c] = (entries[c] as bigint) * scale;
+        if (entries[c] === 0n) continue;
+        spend();
+        entries[c] = (entries[c] as bigint) * scale;
       }
       scalings++;
     }
     const { columns, coefficients } = pivot;
     for (let k = 0; k < columns.length; k++) {
       const c = columns[k] as number;
+      spend();
       entries[c] = (entries[c] as bigint) - multiplier * (coefficients[k] as bigint);
     }
     if (scalings >= SCALINGS_BETWEEN_CONTENTS) {
-      divideByContent(entries, start);
+      divideByContent(entries, start, spend);
       scalings = 0;
     }
   }
-  return { reduced: gather(start, width, (c) => entries[c] as bigint) };
+  return { reduced: gather(start, width, (c) => entries[c] as bigint, spend) };
 }
 
-function divideByContent(entries: bigint[], start: number): void {
+function divideByContent(entries: bigint[], start: number, spend: () => void): void {
   let content = 0n;
   for (let c = start; c < entries.length; c++) {
-    if (entries[c] !== 0n) content = gcd(content, entries[c] as bigint);
+    if (entries[c] !== 0n) content = interruptibleGcd(content, entries[c] as bigint, spend);
     if (content === 1n) return;
   }
   if (content === 0n) return;
@@ -160,6 +165,7 @@ function gather(
   start: number,
   width: number,
   entry: (column: number) => bigint,
+  spend?: () => void,
 ): PivotRow | undefined {
   const columns: number[] = [];
   const coefficients: bigint[] = [];
@@ -170,7 +176,7 @@ function gather(
     coefficients.push(value);
   }
   if (columns.length === 0) return undefined;
-  const primitive = primitiveRow(Int32Array.from(columns), coefficients);
+  const primitive = primitiveRow(Int32Array.from(columns), coefficients, spend);
   return pivotRow(primitive.monomials, primitive);
 }
 

@@ -107,6 +107,7 @@ export function growBasis<R extends Support>(
     waiting.delete(sugar);
     const found = growth.reduce({ rows, pivots: request.pivots });
     for (const { row } of found) {
+      budget.spend(() => `degree ${sugar}, making the pairs of ${found.length} new elements`);
       const lead = leadingMonomial(row);
       pairs.add(growth.add(row), lead, sugar);
       if (lead === table.one) break;

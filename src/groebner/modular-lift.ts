@@ -3,11 +3,11 @@
  * monomials are joined coefficient by coefficient, and reconstructed as rationals once the residues
  * determine them.
  */
-
 import type { PrimeField } from "../arithmetic/prime-field.js";
 import { reconstructTogether, remainderJoiner } from "../arithmetic/reconstruction.js";
+import type { Budget } from "../outcomes/budget.js";
 import type { MonomialId, MonomialTable } from "../polynomials/monomial-table.js";
-import { type ExactRow, type ModularRow, modularRow, primitiveRow } from "./rows.js";
+import { coprimeRow, type ExactRow, type ModularRow, modularRow } from "./rows.js";
 
 /** Reduced bases modulo primes that share their leading monomials, joined into one modulo the product. */
 export class JoinedBases {
@@ -15,6 +15,7 @@ export class JoinedBases {
   #modulus = 1n;
   /** For each element the residues of its coefficients by monomial. */
   #residues: Map<number, bigint>[] = [];
+  #hardest = 0;
 
   /** The primes joined so far. */
   get primes(): readonly number[] {
@@ -39,25 +40,40 @@ export class JoinedBases {
     this.#modulus *= BigInt(prime);
   }
 
-  /** The basis over the rationals that the residues determine, or undefined if they do not suffice. */
-  reconstruct(table: MonomialTable): ExactRow[] | undefined {
+  /**
+   * The basis over the rationals that the residues determine, or undefined if they do not suffice. The element
+   * that failed last time goes first, so that most failures cost one coefficient. @throws LimitReached
+   */
+  reconstruct(table: MonomialTable, budget: Budget): ExactRow[] | undefined {
     const rows: ExactRow[] = [];
-    for (const residues of this.#residues) {
-      const monomials = Int32Array.from(residues.keys()).sort((a, b) =>
-        table.compare(b as MonomialId, a as MonomialId),
+    const others = Array.from(this.#residues.keys()).filter((k) => k !== this.#hardest);
+    for (const k of this.#residues.length === 0 ? [] : [this.#hardest, ...others]) {
+      budget.spend(
+        () => `lifting ${this.#residues.length} elements from ${this.#primes.length} primes`,
       );
-      const values = Array.from(monomials, (id) => residues.get(id) as bigint);
-      const lifted = reconstructTogether(values, this.#modulus);
-      if (lifted === undefined) return undefined;
-      const kept = lifted.numerators.flatMap((n, k) => (n === 0n ? [] : [k]));
-      rows.push(
-        primitiveRow(
-          Int32Array.from(kept, (k) => monomials[k] as number),
-          kept.map((k) => lifted.numerators[k] as bigint),
-        ),
-      );
+      const row = this.#reconstructElement(k, table);
+      if (row === undefined) {
+        this.#hardest = k;
+        return undefined;
+      }
+      rows[k] = row;
     }
     return rows;
+  }
+
+  #reconstructElement(element: number, table: MonomialTable): ExactRow | undefined {
+    const residues = this.#residues[element] as Map<number, bigint>;
+    const monomials = Int32Array.from(residues.keys()).sort((a, b) =>
+      table.compare(b as MonomialId, a as MonomialId),
+    );
+    const values = Array.from(monomials, (id) => residues.get(id) as bigint);
+    const lifted = reconstructTogether(values, this.#modulus);
+    if (lifted === undefined) return undefined;
+    const kept = lifted.numerators.flatMap((n, k) => (n === 0n ? [] : [k]));
+    return coprimeRow(
+      Int32Array.from(kept, (k) => monomials[k] as number),
+      kept.map((k) => lifted.numerators[k] as bigint),
+    );
   }
 }
 

@@ -51,6 +51,8 @@ export interface RationalBasisOptions {
 interface Group {
   readonly joined: JoinedBases;
   candidate: ExactRow[] | undefined;
+  /** No lift is tried before this many primes are joined: attempts are rare where many are needed. */
+  liftAt: number;
   /** No proof is tried before this many primes agree; doubled when a proof fails. */
   proofAt: number;
 }
@@ -98,8 +100,7 @@ export function rationalBasis(
         traces.length = 0;
       }
       joined.add(prime, image.rows);
-      group.candidate = joined.reconstruct(table);
-      budget.spend(() => `lifting from ${joined.primes.length} primes`);
+      lift(group, table, budget);
     }
     return { kind: "undecided", limit: "size", reason: "the primes ran out before a proof" };
   });
@@ -154,10 +155,18 @@ function groupOf(groups: Map<string, Group>, rows: readonly ModularRow[]): Group
   const key = rows.map(leadingMonomial).join(" ");
   let group = groups.get(key);
   if (group === undefined) {
-    group = { joined: new JoinedBases(), candidate: undefined, proofAt: 2 };
+    group = { joined: new JoinedBases(), candidate: undefined, liftAt: 1, proofAt: 2 };
     groups.set(key, group);
   }
   return group;
+}
+
+function lift(group: Group, table: MonomialTable, budget: Budget): void {
+  const count = group.joined.primes.length;
+  group.candidate = count < group.liftAt ? undefined : group.joined.reconstruct(table, budget);
+  if (group.candidate === undefined && count >= group.liftAt) {
+    group.liftAt = count + Math.max(1, count >> 4);
+  }
 }
 
 function finished(

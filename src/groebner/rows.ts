@@ -3,7 +3,7 @@
  * one monomial table. Modular rows are monic with residues; exact rows are primitive integer vectors
  * with a positive leading coefficient, since a Gröbner basis does not see constant factors.
  */
-import { absolute, gcd } from "../arithmetic/integers.js";
+import { absolute, interruptibleGcd } from "../arithmetic/integers.js";
 import type { PrimeField, Residue } from "../arithmetic/prime-field.js";
 import type { MonomialId, MonomialTable } from "../polynomials/monomial-table.js";
 import { type Polynomial, polynomial } from "../polynomials/polynomial.js";
@@ -61,16 +61,27 @@ function sortedRow(
   );
 }
 
-/** The exact row with the given monomials and coefficients, common factors and sign taken out. */
-export function primitiveRow(monomials: Int32Array, coefficients: readonly bigint[]): ExactRow {
+/**
+ * The exact row with the given monomials and coefficients, common factors and sign taken out.
+ * @param spend called again and again while common factors are sought.
+ */
+export function primitiveRow(
+  monomials: Int32Array,
+  coefficients: readonly bigint[],
+  spend?: () => void,
+): ExactRow {
   let common = 0n;
   for (const c of coefficients) {
-    common = gcd(common, c);
+    common = interruptibleGcd(common, c, spend);
     if (common === 1n) break;
   }
   if ((coefficients[0] as bigint) < 0n) common = -common;
-  const primitive = common === 1n ? coefficients : coefficients.map((c) => c / common);
-  return { monomials, coefficients: primitive, small: asSmall(primitive) };
+  return coprimeRow(monomials, common === 1n ? coefficients : coefficients.map((c) => c / common));
+}
+
+/** The exact row with coefficients that are known to have no common factor, the leading one positive. */
+export function coprimeRow(monomials: Int32Array, coefficients: readonly bigint[]): ExactRow {
+  return { monomials, coefficients, small: asSmall(coefficients) };
 }
 
 /**

@@ -39,7 +39,7 @@ export function checkPairs(
   grading: () => Multigrading,
   budget: Budget,
 ): PairCheck {
-  const { pairs, divisors } = pairsOf(table, rows);
+  const { pairs, divisors } = pairsOf(table, rows, budget);
   const matrices = new MatrixReduction(table, exactArithmetic(), grading, budget);
   const total = pairs.size;
   let reduced = 0;
@@ -103,6 +103,7 @@ export function reduceToZero(
 function pairsOf(
   table: MonomialTable,
   rows: readonly ExactRow[],
+  budget: Budget,
 ): { readonly pairs: CriticalPairs; readonly divisors: DivisorSearch } {
   const pairs = new CriticalPairs(table);
   const divisors = new DivisorSearch(table);
@@ -110,6 +111,7 @@ function pairsOf(
     .map((row, index) => ({ index, lead: leadingMonomial(row), row }))
     .sort((a, b) => table.compare(a.lead, b.lead) || a.index - b.index);
   for (const { index, lead, row } of ascending) {
+    budget.spend(() => `making the pairs of ${rows.length} elements`);
     const degree = row.monomials.reduce((d, id) => Math.max(d, table.degree(id as MonomialId)), 0);
     pairs.add(index, lead, degree);
     divisors.add(index, lead);

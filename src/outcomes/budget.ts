@@ -52,8 +52,11 @@ export interface Budget {
   elapsed(): number;
 }
 
-/** Calls of `spend` between two looks at the clock. */
-const CALLS_BETWEEN_LOOKS = 64;
+/**
+ * Calls of `spend` between two looks at the clock. A look takes some 50 ns; a call may stand for 100 ms of
+ * work with long integers or wide matrices, and a limit is to be honoured within about a second.
+ */
+const CALLS_BETWEEN_LOOKS = 8;
 /** Milliseconds between two progress reports. */
 const PROGRESS_INTERVAL = 100;
 
