@@ -14,7 +14,7 @@ export interface TilingFault {
   readonly expected: string;
 }
 
-/** The first fault, row by row; undefined for a tiling. */
+/** The first fault: of a row as such, then of the shape, then of an edge; undefined for a tiling. */
 export function checkTiling(tiling: Tiling): TilingFault | undefined {
   const { rows } = tiling;
   if (rows.length === 0) {
@@ -24,16 +24,23 @@ export function checkTiling(tiling: Tiling): TilingFault | undefined {
     const fault = rowFault(tiling, row);
     if (fault !== undefined) return { row: i + 1, ...fault };
   }
-  for (const [i, row] of rows.entries()) {
-    for (let j = 0; j < row.length; j++) {
-      const fault = staircaseFault(tiling, i, j) ?? edgeFault(tiling, i, j);
+  return firstFault(tiling, staircaseFault) ?? firstFault(tiling, edgeFault);
+}
+
+type CellFault = Pick<TilingFault, "message" | "expected">;
+
+function firstFault(
+  tiling: Tiling,
+  faultAt: (tiling: Tiling, i: number, j: number) => CellFault | undefined,
+): TilingFault | undefined {
+  for (let i = 0; i < tiling.rows.length; i++) {
+    for (let j = 0; j < tiling.rows.length; j++) {
+      const fault = faultAt(tiling, i, j);
       if (fault !== undefined) return { row: i + 1, column: j + 1, ...fault };
     }
   }
   return undefined;
 }
-
-type CellFault = Pick<TilingFault, "message" | "expected">;
 
 function rowFault(
   { kind, rows }: Tiling,

@@ -3,9 +3,22 @@ import { describe, expect, it } from "vitest";
 import { determinantalIdeal } from "../../src/families/determinantal.js";
 import { type Verification, verifyGenerators } from "../../src/groebner/verification.js";
 import { startBudget, unlimited } from "../../src/outcomes/budget.js";
-import { dividesExponents } from "../../src/polynomials/exponents.js";
-import { leadingMonomialOf } from "../../src/polynomials/leading-terms.js";
-import { constant, isZero, multiply, type Polynomial } from "../../src/polynomials/polynomial.js";
+import {
+  dividesExponents,
+  type Exponents,
+  lcmExponents,
+  totalDegree,
+} from "../../src/polynomials/exponents.js";
+import { leadingMonomialOf, monomialComparer } from "../../src/polynomials/leading-terms.js";
+import {
+  constant,
+  divideByConstant,
+  isZero,
+  multiply,
+  type Polynomial,
+  variable,
+} from "../../src/polynomials/polynomial.js";
+import type { VariableIndex } from "../../src/polynomials/polynomial-ring.js";
 import type { TermOrder } from "../../src/polynomials/term-order.js";
 import { randomIdeal } from "../support/arbitraries.js";
 import {
@@ -15,6 +28,7 @@ import {
   reducedBasis,
   sPolynomial,
 } from "../support/buchberger.js";
+import { LinearSpan } from "../support/linear-span.js";
 import { orderOf, polynomials, ring, termSet } from "../support/reading.js";
 
 function verify(generators: readonly Polynomial[], order: TermOrder): Verification {
@@ -35,13 +49,46 @@ function checkWitness(generators: readonly Polynomial[], order: TermOrder, v: Ve
   for (const m of remainder.monomials) {
     expect(leads.some((l) => dividesExponents(l, m))).toBe(false);
   }
-  // It lies in the ideal, and it is a remainder of the pair's S-polynomial: their difference reduces to 0
-  // by the whole basis, and so does the S-polynomial.
-  const basis = reducedBasis(generators, order);
-  expect(isZero(normalForm(remainder, basis, order))).toBe(true);
+  // It is a normal form of the pair's S-polynomial S: a combination of S and of products m·g below the lcm of
+  // the pair. Such products alone do not give S, so the pair really fails Buchberger's criterion.
   const s = sPolynomial(f as Polynomial, g as Polynomial, order);
-  expect(isZero(normalForm(s, basis, order))).toBe(true);
-  expect(isZero(s)).toBe(false);
+  const lcm = lcmExponents(
+    leadingMonomialOf(f as Polynomial, order),
+    leadingMonomialOf(g as Polynomial, order),
+  );
+  if (!order.degreeFirst) {
+    // Infinitely many products lie below the lcm: only that both lie in the ideal is checked.
+    const basis = reducedBasis(generators, order);
+    expect(isZero(normalForm(remainder, basis, order))).toBe(true);
+    expect(isZero(s)).toBe(false);
+    return;
+  }
+  const below = new LinearSpan(order, productsBelow(lcm, generators, order));
+  expect(below.contains(s)).toBe(false);
+  below.add(s);
+  expect(below.contains(remainder)).toBe(true);
+}
+
+/** All products of a monomial with a generator whose leading monomial is below the bound, in a graded order. */
+function productsBelow(
+  bound: Exponents,
+  generators: readonly Polynomial[],
+  order: TermOrder,
+): Polynomial[] {
+  const compare = monomialComparer(order);
+  const variables = order.ring.variables.map((_, v) => variable(order.ring, v as VariableIndex));
+  const degree = totalDegree(bound);
+  let layer = generators.filter((h) => !isZero(h));
+  const products: Polynomial[] = [];
+  const seen = new Set<string>();
+  while (layer.length > 0) {
+    const fits = layer.filter((h) => totalDegree(leadingMonomialOf(h, order)) <= degree);
+    const fresh = fits.filter((h) => !seen.has(termSet(h)));
+    for (const h of fresh) seen.add(termSet(h));
+    products.push(...fresh);
+    layer = fresh.flatMap((h) => variables.map((x) => multiply(h, x)));
+  }
+  return products.filter((h) => compare(leadingMonomialOf(h, order), bound) < 0);
 }
 
 describe("verification of a given set", () => {
@@ -51,7 +98,12 @@ describe("verification of a given set", () => {
     fc.assert(
       fc.property(
         randomIdeal(r, { terms: 3, degree: 2, generators: 4 }),
-        fc.constantFrom("graded revlex", "plain lex", "weights (1,2,3) then graded lex"),
+        fc.constantFrom(
+          "graded revlex",
+          "graded lex",
+          "plain lex",
+          "weights (1,2,3) then graded lex",
+        ),
         (generators, phrase) => {
           const order = orderOf(r, phrase);
           const v = verify(generators, order);
@@ -83,6 +135,34 @@ describe("verification of a given set", () => {
       ),
       { numRuns: 60 },
     );
+  });
+
+  it("gives the same verdict however the generators are listed and scaled", () => {
+    const r = ring("x y z");
+    const verdicts = new Set<string>();
+    fc.assert(
+      fc.property(
+        randomIdeal(r, { terms: 3, degree: 2, generators: 4 }),
+        fc.constantFrom("graded revlex", "graded lex", "plain lex"),
+        fc.infiniteStream(fc.integer({ min: 1, max: 9 })),
+        (generators, phrase, factors) => {
+          const order = orderOf(r, phrase);
+          const { verdict, leadingIdeal } = verify(generators, order);
+          verdicts.add(verdict);
+          const scaled = generators.map((f) => {
+            const factor = BigInt(factors.next().value ?? 1);
+            return divideByConstant(multiply(f, constant(r, -factor)), factor + 1n, 1n);
+          });
+          const listed = [...scaled.reverse(), constant(r, 0n), ...generators];
+          const again = verify(listed, order);
+          expect(again.verdict).toBe(verdict);
+          expect(again.leadingIdeal).toEqual(leadingIdeal);
+          if (again.verdict === "fails") checkWitness(listed, order, again);
+        },
+      ),
+      { numRuns: 100 },
+    );
+    expect([...verdicts].sort()).toEqual(["fails", "holds"]);
   });
 
   it("fails when an element that is needed is dropped", () => {
