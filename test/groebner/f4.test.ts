@@ -11,13 +11,15 @@ import {
   modularPolynomial,
   modularRow,
   monicPolynomial,
+  rowPolynomial,
 } from "../../src/groebner/rows.js";
 import { unlimited } from "../../src/outcomes/budget.js";
-import { MonomialTable } from "../../src/polynomials/monomial-table.js";
+import { type MonomialId, MonomialTable } from "../../src/polynomials/monomial-table.js";
 import { isZero, type Polynomial } from "../../src/polynomials/polynomial.js";
 import type { TermOrder } from "../../src/polynomials/term-order.js";
 import { randomIdeal } from "../support/arbitraries.js";
 import { reducedBasis } from "../support/buchberger.js";
+import { textbookModulo } from "../support/modular-buchberger.js";
 import { orderOf, polynomials, ring, termSets } from "../support/reading.js";
 import { cyclic } from "../support/systems.js";
 
@@ -66,6 +68,19 @@ function modularTexts(
   return termSets(rows.map((row) => modularPolynomial(order.ring, table, primeField(p), row)));
 }
 
+/** Rows as the textbook computation prints its own. */
+function residueSets(table: MonomialTable, rows: readonly ModularRow[]): string[] {
+  const printed = rows.map((row) =>
+    Array.from(row.coefficients, (c, k) => {
+      const exponents = table.exponents(row.monomials[k] as MonomialId);
+      return `${exponents.join()}:${c}`;
+    })
+      .sort()
+      .join(" "),
+  );
+  return printed.sort();
+}
+
 describe("the F4 loop", () => {
   const r = ring("x y z");
   const order = orderOf(r, "graded revlex");
@@ -96,6 +111,69 @@ describe("the F4 loop", () => {
       expect(fullRun(generators, order, p).texts).toEqual(modularTexts(table, order, p, wanted));
     },
   );
+
+  it.each([2, 3, 5, 7, 101, 32003])(
+    "modulo %i gives the reduced basis of the textbook modulo that prime, lucky or not",
+    (p) => {
+      const field = primeField(p);
+      const phrases = [
+        "graded revlex",
+        "graded lex",
+        "plain lex",
+        "weights (3,1,2) then graded lex",
+      ];
+      let compared = 0;
+      fc.assert(
+        fc.property(
+          randomIdeal(r, { terms: 3, degree: 2, generators: 3 }),
+          fc.constantFrom(...phrases),
+          (generators, phrase) => {
+            const wanted = orderOf(r, phrase);
+            const table = new MonomialTable(wanted);
+            const rows = generators.filter((f) => !isZero(f)).map((f) => exactRow(table, f));
+            const modular = rows.map((row) => modularRow(field, row));
+            if (modular.includes(undefined)) return;
+            compared++;
+            const inputs = modular.filter((row) => row !== undefined);
+            const input = { table, inputs, arithmetic: modularArithmetic(field), ...whole };
+            const { basis, trace } = growBasis(input);
+            const found = reduceBasis(input, basis);
+            const textbook = textbookModulo(BigInt(p), wanted);
+            const images = rows.map((row) => textbook.image(rowPolynomial(r, table, row)));
+            expect(residueSets(table, found)).toEqual(textbook.reducedBasis(images));
+            // The run can be repeated from its trace.
+            const replayed = replayTrace(input, trace);
+            if (replayed === undefined) throw new Error("expected the replay to succeed");
+            expect(reduceBasis(input, replayed)).toEqual(found);
+          },
+        ),
+        { numRuns: 60 },
+      );
+      expect(compared).toBeGreaterThan(15);
+    },
+  );
+
+  it("replayed over the integers gives elements that generate the same ideal", () => {
+    fc.assert(
+      fc.property(randomIdeal(r, { terms: 3, degree: 2, generators: 3 }), (generators) => {
+        const table = new MonomialTable(order);
+        const inputs = generators.filter((f) => !isZero(f)).map((f) => exactRow(table, f));
+        const p = 67108859;
+        const { trace } = growBasis({
+          table,
+          inputs: images(table, generators, p),
+          arithmetic: modularArithmetic(primeField(p)),
+          ...whole,
+        });
+        const exact = { table, inputs, arithmetic: exactArithmetic(), ...whole };
+        const replayed = replayTrace(exact, trace);
+        if (replayed === undefined) throw new Error("expected the replay to succeed");
+        const found = reduceBasis(exact, replayed).map((row) => monicPolynomial(r, table, row));
+        expect(termSets(found)).toEqual(termSets(reducedBasis(generators, order)));
+      }),
+      { numRuns: 60 },
+    );
+  });
 
   it("replayed over another prime gives the same basis as a full run there", () => {
     const generators = cyclic(5);
