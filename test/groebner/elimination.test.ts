@@ -14,7 +14,7 @@ import {
   rowPolynomial,
 } from "../../src/groebner/rows.js";
 import { SymbolicPreprocessing } from "../../src/groebner/symbolic-preprocessing.js";
-import { unlimited } from "../../src/outcomes/budget.js";
+import { startBudget, type Undecided, unlimited, withinBudget } from "../../src/outcomes/budget.js";
 import { MonomialTable } from "../../src/polynomials/monomial-table.js";
 import { isZero, type Polynomial, polynomial } from "../../src/polynomials/polynomial.js";
 import { randomPolynomial } from "../support/arbitraries.js";
@@ -83,6 +83,83 @@ describe("exact matrix reduction", () => {
       }),
       { numRuns: 60 },
     );
+  });
+
+  // Doubles are exact below 2⁵³; the bound is met at once, in the middle of a row, or never.
+  it.each([1n, 94906265n, 94906266n, 2n ** 52n, 2n ** 53n - 1n, 2n ** 53n, 2n ** 53n + 1n])(
+    "gives the same in doubles and in big integers, coefficients about %i",
+    (size) => {
+      const near = fc
+        .tuple(fc.constantFrom(1n, -1n, size, -size), fc.bigInt(-3n, 3n))
+        .map(([a, b]) => a + b);
+      const random = fc.array(
+        fc.tuple(randomPolynomial(r, { terms: 5, degree: 2 }), fc.array(near, { minLength: 5 })),
+        { minLength: 2, maxLength: 5 },
+      );
+      const mode = fc.constantFrom<EliminationMode>("echelon", "independent", "tails");
+      fc.assert(
+        fc.property(random, mode, (list, chosen) => {
+          const table = new MonomialTable(order);
+          const fs = list.map(([f, factors]) =>
+            polynomial(
+              r,
+              f.monomials.map((monomial, k) => ({ monomial, numerator: factors[k] as bigint })),
+            ),
+          );
+          const small = fs.filter((f) => !isZero(f)).map((f) => exactRow(table, f));
+          // Without `small` a row is reduced in big integers.
+          const large = small.map((row): ExactRow => ({ ...row, small: undefined }));
+          const reduce = (elements: ExactRow[]) => {
+            const matrix = matrixOf(table, elements, Math.min(2, elements.length));
+            return exactArithmetic()
+              .eliminate(matrix, elements, chosen, unlimited())
+              .map(({ row, source }) => [source, [...row.monomials], [...row.coefficients]]);
+          };
+          expect(reduce(small)).toEqual(reduce(large));
+        }),
+        { numRuns: 100 },
+      );
+    },
+  );
+
+  it("takes common factors out of long rows of big integers on the way", () => {
+    // t0 becomes (b/a)^30·t30: every step multiplies the row, and what is left is one term, a common factor.
+    // In "tails" mode t0 stays beside (b/a)^29·t30, and nothing cancels.
+    const names = Array.from({ length: 31 }, (_, i) => `t${i}`);
+    const many = ring(names.join(" "));
+    const table = new MonomialTable(orderOf(many, "graded lex"));
+    const [a, b] = [10n ** 20n + 1n, 10n ** 20n + 2n];
+    const set = polynomials(
+      many,
+      names.slice(0, 30).map((name, i) => `${a}*${name} - ${b}*t${i + 1}`),
+    );
+    const reduce = (text: string, mode: EliminationMode): (readonly bigint[])[] => {
+      const elements = [...set, ...polynomials(many, [text])].map((f) => exactRow(table, f));
+      const matrix = matrixOf(table, elements, set.length);
+      const left = exactArithmetic().eliminate(matrix, elements, mode, unlimited());
+      return left.map(({ row }) => row.coefficients);
+    };
+    expect(reduce("t0", "independent")).toEqual([[1n]]);
+    expect(reduce("t0 + t1", "tails")).toEqual([[a ** 29n, b ** 29n]]);
+  });
+
+  it("can be stopped inside a single greatest common divisor of long integers", () => {
+    // Two neighbours in the Fibonacci sequence: the most divisions for their size.
+    let [f, g] = [1n, 1n];
+    for (let k = 0; k < 5000; k++) [f, g] = [g, f + g];
+    const table = new MonomialTable(order);
+    const elements = polynomials(r, [`${g}*x + y`, `${f}*x + z`]).map((h) => exactRow(table, h));
+    const matrix = matrixOf(table, elements, 1);
+    let time = 0;
+    const budget = startBudget({ seconds: 0.2, now: () => time++ });
+    const outcome = withinBudget(() =>
+      exactArithmetic().eliminate(matrix, elements, "independent", budget),
+    );
+    expect(outcome).toMatchObject({ kind: "undecided", limit: "seconds" });
+    expect((outcome as Undecided).reason).toMatch(
+      /reducing a matrix of 3 columns in big integers$/,
+    );
+    expect(time).toBeLessThan(250);
   });
 
   it("in echelon mode gives the reduced echelon form", () => {
