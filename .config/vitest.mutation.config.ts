@@ -19,7 +19,7 @@ export default defineConfig({
     ],
     setupFiles: ["test/support/fixed-seed.ts"],
     allowOnly: false,
-    testTimeout: 10_000,
+    testTimeout: 60_000,
     hookTimeout: 20_000,
   },
 });
