@@ -1,12 +1,13 @@
 /**
- * Sets the checkout up, from nothing but Node 20: installs when the lock file changed, builds when
- * the sources changed, and is silent when there is nothing to do. Every npm script starts with it.
- * `prepare.mjs install` stops short of the build. Digests, not times, decide what changed, so that a
+ * Sets the checkout up, from nothing but Node 20: installs when the lock file changed, compiles the
+ * kernel and builds when their sources changed, and is silent when there is nothing to do. Every npm script starts with it.
+ * `prepare.mjs install` stops short of dist/. Digests, not times, decide what changed, so that a
  * fresh clone and a switched branch are told apart from an edited file that was put back.
  */
 import { spawn } from "node:child_process";
 import { createHash } from "node:crypto";
 import * as fs from "node:fs";
+import { tmpdir } from "node:os";
 import { basename, dirname, join, relative } from "node:path";
 import { setTimeout as sleep } from "node:timers/promises";
 import { fileURLToPath } from "node:url";
@@ -16,6 +17,8 @@ const MODULES = join(ROOT, "node_modules");
 const DIST = join(ROOT, "dist");
 const INSTALLED = join(MODULES, ".flatlimit-stamp");
 const BUILT = join(DIST, ".stamp");
+/** The compiled kernel, as a module that holds its bytes: made here, not kept in the repository. */
+const KERNEL = join(ROOT, "src", "kernel", "compiled.ts");
 const LOCK = join(ROOT, ".config", ".prepare-lock");
 const OWNERS = join(LOCK, "owners");
 const BREAKING = `${LOCK}-breaking`;
@@ -71,7 +74,10 @@ function read(path) {
 
 const lockFileDigest = () => digest(["package-lock.json"]);
 const sourcesDigest = () => digest(["package-lock.json", "tsconfig.json", "src"]);
+const kernelDigest = () =>
+  digest(["package-lock.json", "src/kernel/assembly", "src/kernel/layout.ts"]);
 const isInstalled = () => read(INSTALLED) === lockFileDigest();
+const isKernelCompiled = () => read(KERNEL)?.includes(kernelDigest()) === true;
 const isBuilt = () => read(BUILT) === sourcesDigest();
 
 /**
@@ -123,6 +129,27 @@ function linkCommand(main) {
   const link = join(MODULES, ".bin", "flatlimit");
   fs.rmSync(link, { force: true });
   fs.symlinkSync(relative(dirname(link), main), link);
+}
+
+async function compileKernel() {
+  say("compiling the kernel to WebAssembly");
+  const stamp = kernelDigest();
+  const compiler = join(MODULES, "assemblyscript", "bin", "asc.js");
+  const folder = fs.mkdtempSync(join(tmpdir(), "flatlimit-"));
+  const output = join(folder, "kernel.wasm");
+  const options =
+    "-O3 --noAssert --runtime stub --enable simd --enable threads --enable bulk-memory";
+  const memory = "--importMemory --sharedMemory --initialMemory 1 --maximumMemory 65536";
+  await run("the kernel's compiler", process.execPath, [
+    compiler,
+    ...["src/kernel/assembly/index.ts", "-o", output],
+    ...options.split(" "),
+    ...memory.split(" "),
+  ]);
+  const text = fs.readFileSync(output).toString("base64");
+  fs.rmSync(folder, { recursive: true });
+  const head = `/* Compiled from assembly/ by .config/prepare.mjs; sources ${stamp}. */`;
+  fs.writeFileSync(KERNEL, `${head}\nexport const COMPILED_KERNEL =\n  "${text}";\n`);
 }
 
 async function build() {
@@ -218,9 +245,10 @@ if (mode !== "build" && mode !== "install") fail(`expected "build" or "install",
 if (Number(process.versions.node.split(".")[0]) < 20) {
   fail(`Node 20 or later is needed, this is ${process.versions.node}`);
 }
-const isReady = () => isInstalled() && (mode === "install" || isBuilt());
+const isReady = () => isInstalled() && isKernelCompiled() && (mode === "install" || isBuilt());
 if (!isReady()) {
   await takeLock();
   if (!isInstalled()) await install();
+  if (!isKernelCompiled()) await compileKernel();
   if (mode === "build" && !isBuilt()) await build();
 }

@@ -1,4 +1,7 @@
-/** The fast tests, and what `npm run coverage` measures: the branches of the core. */
+/**
+ * The fast tests, those of the engine once with the compiled and once with the plain kernel, and what `npm run coverage` measures: the
+ * branches of the core.
+ */
 import { fileURLToPath } from "node:url";
 import { defineConfig } from "vitest/config";
 
@@ -6,9 +9,25 @@ export default defineConfig({
   root: fileURLToPath(new URL("..", import.meta.url)),
   cacheDir: "node_modules/.vite",
   test: {
-    include: ["test/**/*.test.ts"],
-    exclude: ["test/slow/**"],
-    setupFiles: ["test/support/fixed-seed.ts"],
+    projects: [
+      {
+        extends: true,
+        test: {
+          name: "fast",
+          include: ["test/**/*.test.ts"],
+          exclude: ["test/slow/**"],
+          setupFiles: ["test/support/fixed-seed.ts"],
+        },
+      },
+      {
+        extends: true,
+        test: {
+          name: "plain kernel",
+          include: ["test/groebner/**/*.test.ts", "test/limits/**/*.test.ts"],
+          setupFiles: ["test/support/fixed-seed.ts", "test/support/plain-kernel.ts"],
+        },
+      },
+    ],
     allowOnly: false,
     testTimeout: 30_000,
     hookTimeout: 60_000,

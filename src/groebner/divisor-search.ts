@@ -11,6 +11,7 @@ export class DivisorSearch {
   #masks = new Int32Array(64);
   #elements = new Int32Array(64);
   #count = 0;
+  #version = 0;
 
   /** An empty search over the monomials of a table. */
   constructor(table: MonomialTable) {
@@ -27,12 +28,28 @@ export class DivisorSearch {
     return this.#elements.slice(0, this.#count);
   }
 
+  /** The leading monomials that take part, oldest first; not a copy. */
+  leads(): Int32Array {
+    return this.#leads.subarray(0, this.#count);
+  }
+
+  /** The support masks of the leading monomials; not a copy. */
+  masks(): Int32Array {
+    return this.#masks.subarray(0, this.#count);
+  }
+
+  /** Another number after every change. */
+  get version(): number {
+    return this.#version;
+  }
+
   /**
    * Adds an element and drops those whose leading monomial the new one divides; does nothing when an
    * element here divides the new leading monomial.
    */
   add(element: number, lead: MonomialId): void {
     if (this.find(lead) !== -1) return;
+    this.#version++;
     let kept = 0;
     for (let k = 0; k < this.#count; k++) {
       if (this.#table.divides(lead, this.#leads[k] as MonomialId)) continue;

@@ -6,10 +6,13 @@
  */
 import { interruptibleGcd } from "../arithmetic/integers.js";
 import type { Budget } from "../outcomes/budget.js";
-import { type ColumnRow, monomialsOf, type RowArithmetic, reduceMatrix } from "./row-arithmetic.js";
+import type { EliminationMode, RowArithmetic } from "./row-arithmetic.js";
 import { type ExactRow, primitiveRow } from "./rows.js";
+import type { SymbolicMatrix } from "./symbolic-matrix.js";
 
-interface PivotRow extends ColumnRow {
+interface PivotRow {
+  /** Ascending. */
+  readonly columns: Int32Array;
   readonly coefficients: readonly bigint[];
   readonly small: Float64Array | undefined;
   /** The largest absolute value in `small`. */
@@ -24,25 +27,73 @@ const SCALINGS_BETWEEN_CONTENTS = 8;
 export function exactArithmetic(): RowArithmetic<ExactRow> {
   return {
     eliminate(matrix, elements, mode, budget) {
-      const width = matrix.monomials.length;
-      const accumulator = new Float64Array(width);
-      return reduceMatrix<PivotRow, ExactRow>(matrix, mode, {
-        load: ({ columns, element }) => pivotRow(columns, elements[element] as ExactRow),
-        reduce(row, pivots, from) {
-          budget.spend(() => `reducing a matrix of ${width} columns exactly`);
-          const { reduced } =
-            reduceInDoubles(row, pivots, accumulator, from) ??
-            reduceInBigIntegers(row, pivots, width, from, budget);
-          return reduced;
-        },
-        store: ({ coefficients, small, ...row }) => ({
-          monomials: monomialsOf(matrix, row),
-          coefficients,
-          small,
-        }),
+      return reduceMatrix(matrix, elements, mode, budget).map(({ row, source }) => {
+        const { columns, coefficients, small } = row;
+        return { row: { monomials: matrix.monomials(columns), coefficients, small }, source };
       });
     },
   };
+}
+
+/** The pivots of a matrix, each read when it is first needed; later rows may join them. */
+class Pivots {
+  readonly #matrix: SymbolicMatrix;
+  readonly #elements: readonly ExactRow[];
+  readonly #known: (PivotRow | undefined)[] = [];
+
+  constructor(matrix: SymbolicMatrix, elements: readonly ExactRow[]) {
+    this.#matrix = matrix;
+    this.#elements = elements;
+  }
+
+  at(column: number): PivotRow | undefined {
+    const known = this.#known[column];
+    if (known !== undefined) return known;
+    const row = this.#matrix.pivot(column);
+    if (row === undefined) return undefined;
+    const pivot = pivotRow(row.columns, this.#elements[row.element] as ExactRow);
+    this.#known[column] = pivot;
+    return pivot;
+  }
+
+  set(row: PivotRow): void {
+    this.#known[row.columns[0] as number] = row;
+  }
+}
+
+function reduceMatrix(
+  matrix: SymbolicMatrix,
+  elements: readonly ExactRow[],
+  mode: EliminationMode,
+  budget: Budget,
+): { readonly row: PivotRow; readonly source: number }[] {
+  const { width } = matrix;
+  const pivots = new Pivots(matrix, elements);
+  const accumulator = new Float64Array(width);
+  const reduce = (row: PivotRow, from: number): PivotRow | undefined => {
+    budget.spend(() => `reducing a matrix of ${width} columns exactly`);
+    const quick = reduceInDoubles(row, pivots, accumulator, from);
+    return (quick ?? reduceInBigIntegers(row, pivots, width, from, budget)).reduced;
+  };
+  const left: { row: PivotRow; readonly source: number }[] = [];
+  for (let source = 0; source < matrix.rowCount; source++) {
+    const { columns, element } = matrix.row(source);
+    const row = pivotRow(columns, elements[element] as ExactRow);
+    const first = columns[0] as number;
+    const reduced = reduce(row, mode === "tails" ? first + 1 : first);
+    if (reduced === undefined) continue;
+    left.push({ row: reduced, source });
+    if (mode === "echelon") pivots.set(reduced);
+  }
+  if (mode === "echelon" && left.length > 1) {
+    // Smallest leading monomial first: every row is then reduced by rows that are final.
+    left.sort((a, b) => (b.row.columns[0] as number) - (a.row.columns[0] as number));
+    for (const item of left) {
+      item.row = reduce(item.row, (item.row.columns[0] as number) + 1) ?? item.row;
+      pivots.set(item.row);
+    }
+  }
+  return left;
 }
 
 function pivotRow(columns: Int32Array, row: ExactRow): PivotRow {
@@ -54,7 +105,7 @@ function pivotRow(columns: Int32Array, row: ExactRow): PivotRow {
 /** The reduced row (undefined: it is zero); undefined altogether when doubles do not suffice. */
 function reduceInDoubles(
   row: PivotRow,
-  pivots: readonly (PivotRow | undefined)[],
+  pivots: Pivots,
   accumulator: Float64Array,
   from: number,
 ): { readonly reduced: PivotRow | undefined } | undefined {
@@ -67,7 +118,7 @@ function reduceInDoubles(
   let bound = row.height;
   for (let column = from; column < accumulator.length; column++) {
     const value = accumulator[column] as number;
-    const pivot = value === 0 ? undefined : pivots[column];
+    const pivot = value === 0 ? undefined : pivots.at(column);
     if (pivot === undefined) continue;
     if (pivot.small === undefined) return undefined;
     const lead = pivot.small[0] as number;
@@ -104,7 +155,7 @@ function subtractMultiple(
 
 function reduceInBigIntegers(
   row: PivotRow,
-  pivots: readonly (PivotRow | undefined)[],
+  pivots: Pivots,
   width: number,
   from: number,
   budget: Budget,
@@ -121,7 +172,7 @@ function reduceInBigIntegers(
   for (let column = from; column < width; column++) {
     const value = entries[column] as bigint;
     if (value === 0n) continue;
-    const pivot = pivots[column];
+    const pivot = pivots.at(column);
     if (pivot === undefined) continue;
     const lead = pivot.coefficients[0] as bigint;
     const common = interruptibleGcd(value, lead, spend);

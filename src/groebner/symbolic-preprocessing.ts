@@ -2,31 +2,24 @@
  * Symbolic preprocessing (Faugère, *A new efficient algorithm for computing Gröbner bases (F4)*, JPAA
  * 139, 1999): given rows to reduce, finds every monomial that their reduction can meet and, for each
  * that a leading monomial divides, the multiple of a basis element that reduces it. The result is a
- * matrix whose columns are monomials, largest first; coefficients are not looked at.
+ * matrix whose columns are monomials, largest first; coefficients are not looked at. The work is the
+ * kernel's; here is what it is given. Columns are numbered within their matrix, and only those that a
+ * result needs become monomials of the table, which so stays small.
  */
+import * as at from "../kernel/layout.js";
+import { workspace } from "../kernel/thread-workspace.js";
+import { full, type Workspace } from "../kernel/workspace.js";
 import type { Budget } from "../outcomes/budget.js";
+import { ExponentOverflow } from "../polynomials/exponents.js";
 import type { MonomialId, MonomialTable } from "../polynomials/monomial-table.js";
 import type { DivisorSearch } from "./divisor-search.js";
 import type { Support } from "./rows.js";
+import { SymbolicMatrix } from "./symbolic-matrix.js";
 
 /** A monomial multiple of a basis element. */
 export interface Multiple {
   readonly element: number;
   readonly multiplier: MonomialId;
-}
-
-/** A multiple with the columns of its terms, in ascending order. */
-export interface MatrixRow extends Multiple {
-  readonly columns: Int32Array;
-}
-
-/** A matrix ready for reduction. */
-export interface SymbolicMatrix {
-  /** The monomial of each column, largest first. */
-  readonly monomials: Int32Array;
-  /** For each column the row that reduces it, if there is one; its first column is this one. */
-  readonly pivots: readonly (MatrixRow | undefined)[];
-  readonly rows: readonly MatrixRow[];
 }
 
 /** What a matrix is made from. */
@@ -36,85 +29,104 @@ export interface MatrixRequest {
   readonly pivots: readonly Multiple[];
 }
 
-/** Builds matrices over one table; the scratch space is reused from one to the next. */
+/** Terms placed between two looks at the budget. */
+const FUEL = 100_000;
+
+/** Builds matrices over one table, one at a time: a matrix is gone when the next is built. */
 export class SymbolicPreprocessing {
   readonly #table: MonomialTable;
-  /** For each monomial: 1 + its place in `#met`, later 1 + its column; 0 outside the matrix. */
-  #mark = new Int32Array(1024);
-  #met: number[] = [];
+  readonly #workspace: Workspace;
+  #wide = false;
+  /** The elements that the workspace has, by index. */
+  #elements: (Support | undefined)[] = [];
+  #divisors: { readonly search: DivisorSearch; readonly version: number } | undefined;
 
   /** For matrices over the monomials of a table. */
   constructor(table: MonomialTable) {
     this.#table = table;
+    this.#workspace = workspace();
   }
 
-  /** The matrix in which the requested rows can be fully reduced by the elements of `divisors`. */
+  /**
+   * The matrix in which the requested rows can be fully reduced by the elements of `divisors`.
+   * @throws LimitReached
+   */
   build(
     request: MatrixRequest,
     elements: readonly Support[],
     divisors: DivisorSearch,
     budget: Budget,
   ): SymbolicMatrix {
-    this.#met = [];
-    const reducers = new Map<number, MatrixRow>();
-    for (const pivot of request.pivots) {
-      const row = this.#place(pivot, elements);
-      reducers.set(row.columns[0] as number, row);
+    for (;;) {
+      const matrix = this.#tryBuild(request, elements, divisors, budget);
+      if (matrix !== undefined) return matrix;
+      if (this.#wide) throw new ExponentOverflow();
+      this.#wide = true;
+      this.#divide();
     }
-    const rows = request.rows.map((multiple) => this.#place(multiple, elements));
-    for (let k = 0; k < this.#met.length; k++) {
-      budget.spend(() => `preparing a matrix of ${this.#met.length} columns`);
-      const monomial = this.#met[k] as MonomialId;
-      if (reducers.has(monomial)) continue;
-      const element = divisors.find(monomial);
-      if (element === -1) continue;
-      const lead = (elements[element] as Support).monomials[0] as MonomialId;
-      const multiplier = this.#table.quotient(monomial, lead);
-      reducers.set(monomial, this.#place({ element, multiplier }, elements));
-    }
-    return this.#arrange(rows, reducers);
   }
 
-  /** The monomials of a multiple, marked as met; `columns` holds ids until `#arrange`. */
-  #place({ element, multiplier }: Multiple, elements: readonly Support[]): MatrixRow {
-    const { monomials } = elements[element] as Support;
-    const table = this.#table;
-    const columns = new Int32Array(monomials.length);
-    for (let k = 0; k < monomials.length; k++) {
-      const id = table.product(multiplier, monomials[k] as MonomialId);
-      columns[k] = id;
-      if (id >= this.#mark.length) this.#growMarks();
-      if (this.#mark[id] === 0) {
-        this.#met.push(id);
-        this.#mark[id] = this.#met.length;
-      }
+  /** As `build`; undefined when an exponent does not fit. */
+  #tryBuild(
+    { rows, pivots }: MatrixRequest,
+    elements: readonly Support[],
+    divisors: DivisorSearch,
+    budget: Budget,
+  ): SymbolicMatrix | undefined {
+    const space = this.#workspace;
+    if (!space.isOwnedBy(this)) this.#divide();
+    space.clear();
+    if (!space.copyMonomials(this.#table)) return undefined;
+    this.#bringDivisors(divisors, elements);
+    for (const { element } of pivots) this.#bring(element, elements);
+    for (const { element } of rows) this.#bring(element, elements);
+    for (const pivot of pivots) {
+      const row = this.#place(pivot);
+      if (row === undefined) return undefined;
+      space.makePivot(row);
     }
-    return { element, multiplier, columns };
+    for (const row of rows) {
+      if (this.#place(row) === undefined) return undefined;
+    }
+    for (let state = -1; state !== at.DONE; ) {
+      budget.spend(() => `preparing a matrix of ${space.columnCount} columns`);
+      state = space.kernel.closeMatrix(FUEL);
+      if (state === at.EXPONENT_TOO_LARGE) return undefined;
+      if (state === at.OUT_OF_SPACE) full("columns or rows");
+    }
+    const firstRow = pivots.length;
+    const numbers = space.arrangeColumns(firstRow, firstRow + rows.length);
+    return new SymbolicMatrix(this.#table, space, numbers, { firstRow, rowCount: rows.length });
   }
 
-  #arrange(rows: readonly MatrixRow[], reducers: ReadonlyMap<number, MatrixRow>): SymbolicMatrix {
-    const table = this.#table;
-    const monomials = Int32Array.from(this.#met).sort((a, b) =>
-      table.compare(b as MonomialId, a as MonomialId),
-    );
-    const mark = this.#mark;
-    for (let column = 0; column < monomials.length; column++) {
-      mark[monomials[column] as number] = column;
-    }
-    const pivots = Array.from(monomials, (id) => reducers.get(id));
-    const renumber = (row: MatrixRow): void => {
-      const { columns } = row;
-      for (let k = 0; k < columns.length; k++) columns[k] = mark[columns[k] as number] as number;
-    };
-    rows.forEach(renumber);
-    for (const row of reducers.values()) renumber(row);
-    for (const id of monomials) mark[id] = 0;
-    return { monomials, pivots, rows };
+  #divide(): void {
+    this.#workspace.divide(this, this.#table, this.#wide);
+    this.#elements = [];
+    this.#divisors = undefined;
   }
 
-  #growMarks(): void {
-    const larger = new Int32Array(2 * Math.max(this.#mark.length, this.#table.size));
-    larger.set(this.#mark);
-    this.#mark = larger;
+  #bringDivisors(search: DivisorSearch, elements: readonly Support[]): void {
+    const owners = search.elements();
+    for (const element of owners) this.#bring(element, elements);
+    const known = this.#divisors;
+    if (known?.search === search && known.version === search.version) return;
+    this.#workspace.setLeads(search.leads(), search.masks(), owners);
+    this.#divisors = { search, version: search.version };
+  }
+
+  #bring(element: number, elements: readonly Support[]): void {
+    const row = elements[element] as Support & { readonly coefficients?: unknown };
+    if (this.#elements[element] === row) return;
+    const { monomials, coefficients } = row;
+    const residues = coefficients instanceof Int32Array ? coefficients : undefined;
+    this.#workspace.setElement(element, monomials, residues);
+    this.#elements[element] = row;
+  }
+
+  /** The number of the row; undefined when an exponent does not fit. */
+  #place({ element, multiplier }: Multiple): number | undefined {
+    const row = this.#workspace.kernel.placeRow(element, multiplier);
+    if (row === -at.EXPONENT_TOO_LARGE) return undefined;
+    return row < 0 ? full("columns or rows") : row;
   }
 }

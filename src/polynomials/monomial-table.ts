@@ -73,6 +73,16 @@ export class MonomialTable {
     return this.#exponents.slice(start, start + this.variableCount);
   }
 
+  /** The exponents of the monomials from id `first` up to (without) `end`, one after the other; not a copy. */
+  exponentsBetween(first: number, end: number): Uint16Array {
+    return this.#exponents.subarray(first * this.variableCount, end * this.variableCount);
+  }
+
+  /** The weights of the additive hash, one a variable. */
+  get hashWeights(): Int32Array {
+    return this.#hashWeights;
+  }
+
   /** The total degree of a monomial. */
   degree(id: MonomialId): number {
     return this.#degrees[id] as number;
@@ -222,16 +232,11 @@ function spread(hash: number): number {
 /** With at most 16 variables two bits each (exponent ≥ 1, ≥ 2), else one bit, shared past 32. */
 function supportMask(exponents: Exponents): number {
   let mask = 0;
-  if (exponents.length <= 16) {
-    for (let i = 0; i < exponents.length; i++) {
-      const e = exponents[i] as number;
-      if (e >= 1) mask |= 1 << (2 * i);
-      if (e >= 2) mask |= 2 << (2 * i);
-    }
-    return mask;
-  }
-  for (let i = 0; i < exponents.length; i++) {
-    if (exponents[i] !== 0) mask |= 1 << (i & 31);
+  const twoBits = exponents.length <= 16;
+  for (let v = 0; v < exponents.length; v++) {
+    const e = exponents[v] as number;
+    if (e >= 1) mask |= 1 << (v & 31);
+    if (twoBits && e >= 2) mask |= 65_536 << v;
   }
   return mask;
 }
