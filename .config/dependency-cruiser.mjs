@@ -9,6 +9,7 @@ const FLOORS = [
   "arithmetic",
   "polynomials",
   "kernel",
+  "hilbert",
   "groebner",
   "combinatorics",
   "families",

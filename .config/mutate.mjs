@@ -4,7 +4,7 @@
  */
 import { spawnSync } from "node:child_process";
 
-const FLOORS = ["arithmetic", "components", "groebner", "polynomials"];
+const FLOORS = ["arithmetic", "components", "groebner", "hilbert", "polynomials"];
 
 const chosen = process.argv.slice(2);
 let failed = false;

@@ -16,7 +16,29 @@ export function* primesBelow(limit: number): Generator<number, void> {
   if (!Number.isInteger(limit) || limit > PRIME_LIMIT) {
     throw new RangeError(`expected a limit of at most 2^31, got ${limit}`);
   }
-  for (let candidate = limit - 1; candidate >= 2; candidate--) {
-    if (bigInt(candidate).isPrime()) yield candidate;
+  const known = listFor(limit);
+  for (let k = 0; ; k++) {
+    while (known.primes.length <= k && known.next >= 2) {
+      if (bigInt(known.next).isPrime()) known.primes.push(known.next);
+      known.next--;
+    }
+    const prime = known.primes[k];
+    if (prime === undefined) return;
+    yield prime;
   }
+}
+
+interface KnownPrimes {
+  readonly primes: number[];
+  /** The largest number that has not been tested. */
+  next: number;
+}
+
+/** Lists that have been begun: short ideals take longer to find their primes than to compute with them. */
+const begun = new Map<number, KnownPrimes>();
+
+function listFor(limit: number): KnownPrimes {
+  const known = begun.get(limit) ?? { primes: [], next: limit - 1 };
+  begun.set(limit, known);
+  return known;
 }

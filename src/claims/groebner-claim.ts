@@ -1,5 +1,5 @@
 /** The claim that a generating set is a Gröbner basis of its ideal in an order. */
-import { rationalBasis } from "../groebner/rational-basis.js";
+import { largestDegree, rationalBasis } from "../groebner/rational-basis.js";
 import { type VerificationWitness, verifyGenerators } from "../groebner/verification.js";
 import {
   type Budget,
@@ -10,6 +10,7 @@ import {
 } from "../outcomes/budget.js";
 import { totalDegree } from "../polynomials/exponents.js";
 import { isHomogeneous, type Polynomial } from "../polynomials/polynomial.js";
+import { rememberBasis, rememberedBasis } from "./known-basis.js";
 import type { Question } from "./question.js";
 
 /** Size and largest degree of the reduced Gröbner basis of the ideal. */
@@ -46,6 +47,7 @@ export function decideGroebner(
   const verification = verifyGenerators(polynomials, question.order, budget);
   if (verification.kind === "undecided") return verification;
   const { verdict, pairsReduced } = verification;
+  if (verdict === "holds") rememberBasis(question.ideal, verification.generators);
   const claim = {
     ...question,
     kind: "groebner-claim",
@@ -57,22 +59,23 @@ export function decideGroebner(
   // For graded orders and homogeneous ideals an element's degree is that of its leading monomial.
   const graded = question.order.degreeFirst || polynomials.every(isHomogeneous);
   if (verdict === "holds" && graded) {
-    const leads = verification.leadingIdeal.generators.map((m) => [m]);
-    return { ...claim, witness: undefined, basis: basisSize(leads) };
+    const leads = verification.leadingIdeal.generators;
+    const maxDegree = leads.reduce((most, m) => Math.max(most, totalDegree(m)), 0);
+    return { ...claim, witness: undefined, basis: { size: leads.length, maxDegree } };
   }
+  const known = rememberedBasis(question.ideal);
   const basis =
     basisSeconds > 0
-      ? rationalBasis(polynomials, question.order, startBudget({ seconds: basisSeconds }))
+      ? rationalBasis(polynomials, question.order, startBudget({ seconds: basisSeconds }), {
+          known,
+        })
       : undefined;
   return {
     ...claim,
     witness: verdict === "fails" ? verification.witness : undefined,
-    basis: basis?.kind === "basis" ? basisSize(basis.elements.map((g) => g.monomials)) : undefined,
+    basis:
+      basis?.kind === "basis"
+        ? { size: basis.rows.length, maxDegree: largestDegree(basis) }
+        : undefined,
   };
-}
-
-/** Size and largest degree of a reduced basis, from the monomials of its elements. */
-function basisSize(elements: readonly (readonly Uint16Array[])[]): BasisSize {
-  const degrees = elements.flatMap((monomials) => monomials.map(totalDegree));
-  return { size: elements.length, maxDegree: degrees.reduce((a, b) => Math.max(a, b), 0) };
 }

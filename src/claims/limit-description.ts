@@ -1,9 +1,20 @@
 /** The flat limit of an ideal with everything that is read off it: components, multiplicities, degree. */
-import { codimensionOf, degreeOf, hilbertNumerator } from "../components/hilbert-numerator.js";
+
 import { type PrimaryComponent, primaryComponents } from "../components/primary-components.js";
+import type { KnownBasis } from "../groebner/guided-basis.js";
+import { verifyGenerators } from "../groebner/verification.js";
+import { codimensionOf, degreeOf, hilbertNumerator } from "../hilbert/hilbert-numerator.js";
 import { type FlatLimit, flatLimit } from "../limits/flat-limit.js";
-import { type Budget, isList, type Undecided, withinBudget } from "../outcomes/budget.js";
+import {
+  type Budget,
+  isList,
+  LimitReached,
+  type Undecided,
+  withinBudget,
+} from "../outcomes/budget.js";
 import { isSquarefree } from "../polynomials/monomial-ideal.js";
+import type { Polynomial } from "../polynomials/polynomial.js";
+import { promisedBasis, rememberBasis, rememberedBasis } from "./known-basis.js";
 import type { Question } from "./question.js";
 
 /** A flat limit, described. */
@@ -24,9 +35,13 @@ export interface LimitDescription extends Question {
 export function describeLimit(question: Question, budget: Budget): LimitDescription | Undecided {
   const polynomials = withinBudget(() => question.generators.polynomials(budget));
   if (!isList(polynomials)) return polynomials;
-  const limit = flatLimit(polynomials, question.order, budget);
+  const limit = withinBudget(() => {
+    const known = helpfulBasis(question, polynomials, budget);
+    return flatLimit(polynomials, question.order, budget, { known });
+  });
   if (limit.kind === "undecided") return limit;
-  const { leadingIdeal, monomial } = limit;
+  const { leadingIdeal, monomial, basis } = limit;
+  rememberBasis(question.ideal, basis);
   return withinBudget((): LimitDescription => {
     const numerator = hilbertNumerator(leadingIdeal, budget);
     const components = monomial ? primaryComponents(leadingIdeal, budget) : notMonomial();
@@ -42,6 +57,22 @@ export function describeLimit(question: Question, budget: Budget): LimitDescript
       unmixed: isList(components) ? components.every((c) => !c.embedded) : null,
     };
   });
+}
+
+/**
+ * A basis that makes the limit cheap: one that is known already, the generators themselves when they are one, or
+ * the one that a theorem promises. Only for the families that have such a theorem: there the checks are short.
+ */
+function helpfulBasis(
+  { ideal, order }: Question,
+  polynomials: readonly Polynomial[],
+  budget: Budget,
+): KnownBasis | undefined {
+  const remembered = rememberedBasis(ideal);
+  if (remembered !== undefined || ideal.defaultBasis === undefined) return remembered;
+  const verification = verifyGenerators(polynomials, order, budget);
+  if (verification.kind === "undecided") throw new LimitReached(verification);
+  return verification.verdict === "holds" ? verification.generators : promisedBasis(ideal, budget);
 }
 
 function notMonomial(): Undecided {

@@ -5,11 +5,12 @@
  * variables outside P set to 1, the colength of what is left.
  * @source Miller, Sturmfels, *Combinatorial Commutative Algebra*, chapters 1 and 5.
  */
+
+import { degreeOf, hilbertNumerator } from "../hilbert/hilbert-numerator.js";
 import { type Budget, type Undecided, unlimited, withinBudget } from "../outcomes/budget.js";
 import { type Exponents, lcmExponents } from "../polynomials/exponents.js";
 import { isSquarefree, type MonomialIdeal, monomialIdeal } from "../polynomials/monomial-ideal.js";
 import type { VariableIndex } from "../polynomials/polynomial-ring.js";
-import { degreeOf, hilbertNumerator } from "./hilbert-numerator.js";
 import { type IrreducibleIdeal, irreducibleDecomposition } from "./irreducible-decomposition.js";
 import { type MonomialPrime, minimalPrimes } from "./minimal-primes.js";
 

@@ -48,5 +48,6 @@ export function determinantalIdeal(m: number, n: number, r: number): Ideal {
       },
     ],
     defaultOrder: "lex from nw by rows",
+    defaultBasis: "Sturmfels, *Gröbner bases and Stanley decompositions of determinantal rings*",
   };
 }

@@ -31,6 +31,11 @@ export interface Ideal {
   readonly generatingSets: readonly [GeneratingSet, ...GeneratingSet[]];
   /** Phrase of the order used when none is asked for. */
   readonly defaultOrder: string;
+  /**
+   * The theorem by which the first generating set is a Gröbner basis in the default order, if there is one. Other
+   * orders profit from it; it is not taken on trust, but checked before it is used.
+   */
+  readonly defaultBasis?: string;
   /** Whose tilings its limits are compared with. */
   readonly permutation?: Permutation;
 }

@@ -48,7 +48,12 @@ export function schubertIdeal(w: Permutation): Ideal {
     polynomials: (budget) =>
       cdgGenerators(byCorners.ring, matrix, corners, dominantVariables(w, matrix), budget),
   };
-  return { ...byCorners, generatingSets: [fulton, cdg, ...others], permutation: w };
+  return {
+    ...byCorners,
+    generatingSets: [fulton, cdg, ...others],
+    defaultBasis: "Knutson, Miller, *Gröbner geometry of Schubert polynomials*, theorem B",
+    permutation: w,
+  };
 }
 
 function dominantVariables(w: Permutation, matrix: VariableMatrix): VariableIndex[] {

@@ -6,16 +6,15 @@
  */
 import { interruptibleGcd } from "../arithmetic/integers.js";
 import type { Budget } from "../outcomes/budget.js";
-import type { EliminationMode, RowArithmetic } from "./row-arithmetic.js";
-import { type ExactRow, primitiveRow } from "./rows.js";
+import type { EliminationTask, RowArithmetic } from "./row-arithmetic.js";
+import { coprimeRow, type ExactRow, primitiveRow, smallRow } from "./rows.js";
 import type { SymbolicMatrix } from "./symbolic-matrix.js";
 
 interface PivotRow {
   /** Ascending. */
   readonly columns: Int32Array;
-  readonly coefficients: readonly bigint[];
-  readonly small: Float64Array | undefined;
-  /** The largest absolute value in `small`. */
+  readonly row: Pick<ExactRow, "coefficients" | "small">;
+  /** The largest absolute value among small coefficients. */
   readonly height: number;
 }
 
@@ -26,11 +25,17 @@ const SCALINGS_BETWEEN_CONTENTS = 8;
 /** Row arithmetic over the integers: primitive rows, exact results. */
 export function exactArithmetic(): RowArithmetic<ExactRow> {
   return {
-    eliminate(matrix, elements, mode, budget) {
-      return reduceMatrix(matrix, elements, mode, budget).map(({ row, source }) => {
-        const { columns, coefficients, small } = row;
-        return { row: { monomials: matrix.monomials(columns), coefficients, small }, source };
-      });
+    eliminate(matrix, elements, task, budget) {
+      return reduceMatrix(matrix, elements, task, budget).map(
+        ({ row: { columns, row }, source }) => {
+          const monomials = matrix.monomials(columns);
+          const exact =
+            row.small === undefined
+              ? coprimeRow(monomials, row.coefficients)
+              : smallRow(monomials, row.small);
+          return { row: exact, source };
+        },
+      );
     },
   };
 }
@@ -64,7 +69,7 @@ class Pivots {
 function reduceMatrix(
   matrix: SymbolicMatrix,
   elements: readonly ExactRow[],
-  mode: EliminationMode,
+  { mode, most }: EliminationTask,
   budget: Budget,
 ): { readonly row: PivotRow; readonly source: number }[] {
   const { width } = matrix;
@@ -76,7 +81,7 @@ function reduceMatrix(
     return (quick ?? reduceInBigIntegers(row, pivots, width, from, budget)).reduced;
   };
   const left: { row: PivotRow; readonly source: number }[] = [];
-  for (let source = 0; source < matrix.rowCount; source++) {
+  for (let source = 0; source < matrix.rowCount && left.length < most; source++) {
     const { columns, element } = matrix.row(source);
     const row = pivotRow(columns, elements[element] as ExactRow);
     const first = columns[0] as number;
@@ -96,10 +101,15 @@ function reduceMatrix(
   return left;
 }
 
-function pivotRow(columns: Int32Array, row: ExactRow): PivotRow {
+function pivotRow(columns: Int32Array, row: Pick<ExactRow, "coefficients" | "small">): PivotRow {
+  const { small } = row;
+  return { columns, row, height: small === undefined ? Infinity : heightOf(small) };
+}
+
+function heightOf(values: Float64Array): number {
   let height = 0;
-  for (const c of row.small ?? []) height = Math.max(height, Math.abs(c));
-  return { columns, coefficients: row.coefficients, small: row.small, height };
+  for (let k = 0; k < values.length; k++) height = Math.max(height, Math.abs(values[k] as number));
+  return height;
 }
 
 /** The reduced row (undefined: it is zero); undefined altogether when doubles do not suffice. */
@@ -109,19 +119,22 @@ function reduceInDoubles(
   accumulator: Float64Array,
   from: number,
 ): { readonly reduced: PivotRow | undefined } | undefined {
-  if (row.small === undefined) return undefined;
-  const start = row.columns[0] as number;
+  const { columns, height } = row;
+  const { small } = row.row;
+  if (small === undefined) return undefined;
+  const start = columns[0] as number;
   accumulator.fill(0, start);
-  for (let k = 0; k < row.columns.length; k++) {
-    accumulator[row.columns[k] as number] = row.small[k] as number;
+  for (let k = 0; k < columns.length; k++) {
+    accumulator[columns[k] as number] = small[k] as number;
   }
-  let bound = row.height;
+  let bound = height;
   for (let column = from; column < accumulator.length; column++) {
     const value = accumulator[column] as number;
     const pivot = value === 0 ? undefined : pivots.at(column);
     if (pivot === undefined) continue;
-    if (pivot.small === undefined) return undefined;
-    const lead = pivot.small[0] as number;
+    const reducing = pivot.row.small;
+    if (reducing === undefined) return undefined;
+    const lead = reducing[0] as number;
     const common = gcdOfDoubles(value, lead);
     const scale = lead / common;
     const multiplier = value / common;
@@ -130,9 +143,9 @@ function reduceInDoubles(
     bound = bound * scale + growth;
     if (bound > EXACT_LIMIT) return undefined;
     if (scale !== 1) multiplyFrom(accumulator, start, scale);
-    subtractMultiple(accumulator, pivot.columns, pivot.small, multiplier);
+    subtractMultiple(accumulator, pivot.columns, reducing, multiplier);
   }
-  return { reduced: gather(start, accumulator.length, (c) => BigInt(accumulator[c] as number)) };
+  return { reduced: gatherDoubles(accumulator, start) };
 }
 
 function multiplyFrom(accumulator: Float64Array, start: number, factor: number): void {
@@ -163,7 +176,7 @@ function reduceInBigIntegers(
   const start = row.columns[0] as number;
   const entries = new Array<bigint>(width).fill(0n);
   for (let k = 0; k < row.columns.length; k++) {
-    entries[row.columns[k] as number] = row.coefficients[k] as bigint;
+    entries[row.columns[k] as number] = row.row.coefficients[k] as bigint;
   }
   // Integers may grow to millions of bits, so that single operations take long: every one is accounted for.
   const stage = (): string => `reducing a matrix of ${width} columns in big integers`;
@@ -174,7 +187,7 @@ function reduceInBigIntegers(
     if (value === 0n) continue;
     const pivot = pivots.at(column);
     if (pivot === undefined) continue;
-    const lead = pivot.coefficients[0] as bigint;
+    const lead = pivot.row.coefficients[0] as bigint;
     const common = interruptibleGcd(value, lead, spend);
     const scale = lead / common;
     const multiplier = value / common;
@@ -186,7 +199,8 @@ function reduceInBigIntegers(
       }
       scalings++;
     }
-    const { columns, coefficients } = pivot;
+    const { columns } = pivot;
+    const { coefficients } = pivot.row;
     for (let k = 0; k < columns.length; k++) {
       const c = columns[k] as number;
       spend();
@@ -197,7 +211,7 @@ function reduceInBigIntegers(
       scalings = 0;
     }
   }
-  return { reduced: gather(start, width, (c) => entries[c] as bigint, spend) };
+  return { reduced: gatherBigIntegers(entries, start, spend) };
 }
 
 function divideByContent(entries: bigint[], start: number, spend: () => void): void {
@@ -212,16 +226,41 @@ function divideByContent(entries: bigint[], start: number, spend: () => void): v
   }
 }
 
-function gather(
+/** The primitive row in the accumulator; undefined if it is zero. */
+function gatherDoubles(accumulator: Float64Array, start: number): PivotRow | undefined {
+  let length = 0;
+  let content = 0;
+  for (let column = start; column < accumulator.length; column++) {
+    const value = accumulator[column] as number;
+    if (value === 0) continue;
+    length++;
+    if (content !== 1) content = content === 0 ? Math.abs(value) : gcdOfDoubles(value, content);
+  }
+  if (length === 0) return undefined;
+  const columns = new Int32Array(length);
+  const values = new Float64Array(length);
+  for (let column = start, k = 0; k < length; column++) {
+    const value = accumulator[column] as number;
+    if (value === 0) continue;
+    columns[k] = column;
+    values[k++] = value;
+  }
+  const unit = (values[0] as number) < 0 ? -content : content;
+  if (unit !== 1) {
+    for (let k = 0; k < length; k++) values[k] = (values[k] as number) / unit;
+  }
+  return pivotRow(columns, smallRow(columns, values));
+}
+
+function gatherBigIntegers(
+  entries: readonly bigint[],
   start: number,
-  width: number,
-  entry: (column: number) => bigint,
-  spend?: () => void,
+  spend: () => void,
 ): PivotRow | undefined {
   const columns: number[] = [];
   const coefficients: bigint[] = [];
-  for (let column = start; column < width; column++) {
-    const value = entry(column);
+  for (let column = start; column < entries.length; column++) {
+    const value = entries[column] as bigint;
     if (value === 0n) continue;
     columns.push(column);
     coefficients.push(value);

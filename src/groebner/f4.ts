@@ -2,15 +2,18 @@
  * The F4 loop: a basis grows degree by degree (by sugar for inhomogeneous input), all critical pairs of
  * one degree in one matrix. The loop leaves a trace of the rows that gave something; a later run over
  * another prime, or over the integers, replays just these and makes no pairs.
+ * When the Hilbert function is known, pairs that cannot give anything are passed over (`hilbert-guide.ts`).
  * @source Faugère, *A new efficient algorithm for computing Gröbner bases (F4)*, JPAA 139 (1999);
  * Giovini, Mora, Niesi, Robbiano, Traverso, *"One sugar cube, please"*, ISSAC 1991; tracing after
  * Traverso, *Gröbner trace algorithms*, ISSAC 1988.
  */
 import type { Budget } from "../outcomes/budget.js";
+import type { Exponents } from "../polynomials/exponents.js";
 import type { MonomialId, MonomialTable } from "../polynomials/monomial-table.js";
 import type { Multigrading } from "../polynomials/multigrading.js";
 import { type CriticalPair, CriticalPairs } from "./critical-pairs.js";
 import { DivisorSearch } from "./divisor-search.js";
+import type { HilbertGuide, Missing } from "./hilbert-guide.js";
 import { MatrixReduction } from "./matrix-reduction.js";
 import type { Remainder, RowArithmetic } from "./row-arithmetic.js";
 import { leadingMonomial, type Support } from "./rows.js";
@@ -42,6 +45,8 @@ export interface BasisInput<R extends Support> {
   /** A grading in which the inputs are homogeneous; matrices are split along it. */
   readonly grading: () => Multigrading;
   readonly budget: Budget;
+  /** What the Hilbert function of the ideal lets expect; only for inputs homogeneous in the total degree. */
+  readonly guide?: HilbertGuide | undefined;
 }
 
 /** The state that a run and a replay share: elements, reducers, matrices. */
@@ -59,9 +64,9 @@ class Growth<R extends Support> {
   }
 
   /** Reduces the requested rows to echelon form, smallest leading monomial first. */
-  reduce(request: MatrixRequest): Remainder<R>[] {
+  reduce(request: MatrixRequest, missing?: Missing): Remainder<R>[] {
     return this.#matrices
-      .reduce(request, this.elements, this.divisors, "echelon")
+      .reduce(request, this.elements, this.divisors, "echelon", missing)
       .sort((a, b) => this.#table.compare(leadingMonomial(a.row), leadingMonomial(b.row)));
   }
 
@@ -70,6 +75,11 @@ class Growth<R extends Support> {
     this.elements.push(row);
     this.divisors.add(this.elements.length - 1, leadingMonomial(row));
     return this.elements.length - 1;
+  }
+
+  /** The leading monomials that no other divides. */
+  leads(): Exponents[] {
+    return Array.from(this.divisors.leads(), (id) => this.#table.exponents(id as MonomialId));
   }
 
   result(): GrownBasis<R> {
@@ -102,10 +112,16 @@ export function growBasis<R extends Support>(
     const sugar = Math.min(pairs.nextSugar, ...waiting.keys());
     if (sugar === Infinity) break;
     budget.spend(() => `degree ${sugar}, ${growth.divisors.size} elements, ${pairs.size} pairs`);
+    const missing = input.guide?.missing(growth.leads(), sugar);
+    if (missing?.total === 0) {
+      pairs.take(sugar);
+      waiting.delete(sugar);
+      continue;
+    }
     const request = matrixOfPairs(table, pairs.take(sugar), growth.elements);
     const rows = [...request.rows, ...(waiting.get(sugar) ?? [])];
     waiting.delete(sugar);
-    const found = growth.reduce({ rows, pivots: request.pivots });
+    const found = growth.reduce({ rows, pivots: request.pivots }, missing);
     for (const { row } of found) {
       budget.spend(() => `degree ${sugar}, making the pairs of ${found.length} new elements`);
       const lead = leadingMonomial(row);
@@ -137,6 +153,18 @@ export function replayTrace<R extends Support>(
     for (const { row } of found) growth.add(row);
   }
   return growth.result();
+}
+
+/** The inputs themselves, when they are known to be a Gröbner basis. */
+export function withoutGrowth<R extends Support>({
+  table,
+  inputs,
+}: Pick<BasisInput<R>, "table" | "inputs">): GrownBasis<R> {
+  const divisors = new DivisorSearch(table);
+  inputs.forEach((row, k) => {
+    divisors.add(k, leadingMonomial(row));
+  });
+  return { elements: inputs, minimal: divisors.elements().slice() };
 }
 
 /**

@@ -7,6 +7,7 @@ import type { Budget } from "../outcomes/budget.js";
 import type { MonomialId, MonomialTable } from "../polynomials/monomial-table.js";
 import { type Multigrading, multidegreeKey } from "../polynomials/multigrading.js";
 import type { DivisorSearch } from "./divisor-search.js";
+import type { Missing } from "./hilbert-guide.js";
 import type { EliminationMode, Remainder, RowArithmetic } from "./row-arithmetic.js";
 import type { Support } from "./rows.js";
 import {
@@ -45,23 +46,21 @@ export class MatrixReduction<R extends Support> {
 
   /**
    * Reduces the requested multiples of elements by the elements of `divisors`; `source` of a remainder is
-   * its index among the requested rows. @throws LimitReached
+   * its index among the requested rows.
+   * @param missing what is still to be found: rows where nothing is missing are passed over. @throws LimitReached
    */
   reduce(
     request: MatrixRequest,
     elements: readonly R[],
     divisors: DivisorSearch,
     mode: EliminationMode,
+    missing?: Missing,
   ): Remainder<R>[] {
     const remainders: Remainder<R>[] = [];
-    for (const { rows, pivots, sources } of this.#blocks(request, elements)) {
+    for (const { rows, pivots, sources, most } of this.#blocks(request, elements, missing)) {
       const matrix = this.#matrices.build({ rows, pivots }, elements, divisors, this.#budget);
-      for (const { row, source } of this.#arithmetic.eliminate(
-        matrix,
-        elements,
-        mode,
-        this.#budget,
-      )) {
+      const found = this.#arithmetic.eliminate(matrix, elements, { mode, most }, this.#budget);
+      for (const { row, source } of found) {
         remainders.push({ row, source: sources[source] as number });
       }
     }
@@ -71,18 +70,29 @@ export class MatrixReduction<R extends Support> {
   #blocks(
     { rows, pivots }: MatrixRequest,
     elements: readonly Support[],
-  ): Iterable<MatrixRequest & { readonly sources: readonly number[] }> {
+    missing: Missing | undefined,
+  ): Iterable<Block> {
     const terms = rows.reduce((sum, row) => sum + termsOf(elements, row), 0);
     if (rows.length < 2 || terms < TERMS_WORTH_SPLITTING || this.#grading().weights.length < 2) {
-      return [{ rows, pivots, sources: Array.from(rows.keys()) }];
+      return [
+        {
+          rows: [...rows],
+          pivots: [...pivots],
+          sources: Array.from(rows.keys()),
+          most: missing?.total ?? Infinity,
+        },
+      ];
     }
-    const blocks = new Map<string, { rows: Multiple[]; pivots: Multiple[]; sources: number[] }>();
-    const blockOf = ({ element, multiplier }: Multiple) => {
+    const blocks = new Map<string, Block>();
+    const blockOf = ({ element, multiplier }: Multiple): Block => {
       const lead = (elements[element] as Support).monomials[0] as MonomialId;
       const exponents = this.#table.exponents(this.#table.product(multiplier, lead));
       const key = multidegreeKey(this.#grading(), exponents);
-      const block = blocks.get(key) ?? { rows: [], pivots: [], sources: [] };
-      blocks.set(key, block);
+      let block = blocks.get(key);
+      if (block === undefined) {
+        block = { rows: [], pivots: [], sources: [], most: missing?.at(exponents) ?? Infinity };
+        blocks.set(key, block);
+      }
       return block;
     };
     rows.forEach((row, source) => {
@@ -91,8 +101,18 @@ export class MatrixReduction<R extends Support> {
       block.sources.push(source);
     });
     for (const pivot of pivots) blockOf(pivot).pivots.push(pivot);
-    return blocks.values();
+    return [...blocks.values()].filter(({ most }) => most > 0);
   }
+}
+
+/** The rows of one multidegree. */
+interface Block {
+  readonly rows: Multiple[];
+  readonly pivots: Multiple[];
+  /** For each row its index among the requested ones. */
+  readonly sources: number[];
+  /** More remainders than this there cannot be. */
+  readonly most: number;
 }
 
 function termsOf(elements: readonly Support[], { element }: Multiple): number {

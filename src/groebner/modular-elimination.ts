@@ -20,12 +20,12 @@ interface Left {
 /** Row arithmetic over a prime field: monic rows. */
 export function modularArithmetic(field: PrimeField): RowArithmetic<ModularRow> {
   return {
-    eliminate(matrix, _elements, mode, budget) {
+    eliminate(matrix, _elements, { mode, most }, budget) {
       const { workspace, width, firstRow, rowCount } = matrix;
       const sweeper = new Sweeper(workspace, width, field.prime);
       const stage = (): string => `reducing a matrix of ${width} columns modulo ${field.prime}`;
       let left: Left[] = [];
-      for (let source = 0; source < rowCount; source++) {
+      for (let source = 0; source < rowCount && left.length < most; source++) {
         budget.spend(stage);
         const reduced = sweeper.reduceRow(firstRow + source, source, mode === "tails");
         if (reduced === undefined) continue;

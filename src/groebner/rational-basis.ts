@@ -9,11 +9,12 @@ import { type PrimeField, primeField } from "../arithmetic/prime-field.js";
 import { FAST_PRIME_LIMIT, primesBelow } from "../arithmetic/primes.js";
 import { type Budget, LimitReached, type Undecided, withinBudget } from "../outcomes/budget.js";
 import { gradedRevlex } from "../polynomials/graded-revlex.js";
-import { MonomialTable } from "../polynomials/monomial-table.js";
+import { type MonomialId, MonomialTable } from "../polynomials/monomial-table.js";
 import { finestGradingLater } from "../polynomials/multigrading.js";
 import { isHomogeneous, isZero, type Polynomial } from "../polynomials/polynomial.js";
 import type { TermOrder } from "../polynomials/term-order.js";
 import { type BasisInput, growBasis, reduceBasis, replayTrace, type Trace } from "./f4.js";
+import { guidedBasis, type KnownBasis } from "./guided-basis.js";
 import { modularArithmetic } from "./modular-elimination.js";
 import { areImages, JoinedBases } from "./modular-lift.js";
 import { type Membership, proveBasis } from "./proof.js";
@@ -30,14 +31,23 @@ import {
 export interface RationalBasis {
   readonly kind: "basis";
   readonly order: TermOrder;
-  /** Monic, reduced, smallest leading monomial first. Empty for the zero ideal. */
+  /** Monic, reduced, smallest leading monomial first; made when first asked for. Empty for the zero ideal. */
   readonly elements: readonly Polynomial[];
   /** The same elements as rows over `table`. */
   readonly rows: readonly ExactRow[];
   readonly table: MonomialTable;
-  /** The primes whose images were lifted. */
+  /** The primes whose images were lifted; none when it was computed exactly. */
   readonly primes: readonly number[];
   readonly evidence: "proved";
+}
+
+/** The largest total degree of a monomial in a basis; 0 for the empty one. */
+export function largestDegree({ rows, table }: RationalBasis): number {
+  let largest = 0;
+  for (const { monomials } of rows) {
+    for (const id of monomials) largest = Math.max(largest, table.degree(id as MonomialId));
+  }
+  return largest;
 }
 
 /**
@@ -46,6 +56,8 @@ export interface RationalBasis {
  */
 export interface RationalBasisOptions {
   readonly primes?: Iterable<number> | undefined;
+  /** A Gröbner basis of the same ideal in another order, from which its Hilbert function is known. */
+  readonly known?: KnownBasis | undefined;
 }
 
 interface Group {
@@ -70,6 +82,8 @@ export function rationalBasis(
 ): RationalBasis | Undecided {
   return withinBudget((): RationalBasis | Undecided => {
     const table = new MonomialTable(order);
+    const guided = options.known && guidedBasis(generators, table, options.known, budget);
+    if (guided !== undefined) return finished(order, table, guided, []);
     const nonZero = generators.filter((f) => !isZero(f));
     const grading = finestGradingLater(nonZero);
     const { start, membership } = startingPoint(nonZero, order, budget);
@@ -175,6 +189,17 @@ function finished(
   rows: readonly ExactRow[],
   primes: readonly number[],
 ): RationalBasis {
-  const elements = rows.map((row) => monicPolynomial(order.ring, table, row));
-  return { kind: "basis", order, elements, rows, table, primes, evidence: "proved" };
+  let elements: readonly Polynomial[] | undefined;
+  return {
+    kind: "basis",
+    order,
+    get elements() {
+      elements ??= rows.map((row) => monicPolynomial(order.ring, table, row));
+      return elements;
+    },
+    rows,
+    table,
+    primes,
+    evidence: "proved",
+  };
 }

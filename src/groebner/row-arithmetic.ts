@@ -22,6 +22,13 @@ export interface Remainder<R extends Support> {
  */
 export type EliminationMode = "echelon" | "independent" | "tails";
 
+/** What is asked of an elimination. */
+export interface EliminationTask {
+  readonly mode: EliminationMode;
+  /** With so many remainders it may stop: the other rows are known to reduce to zero. */
+  readonly most: number;
+}
+
 /** Matrix reduction over one coefficient domain. */
 export interface RowArithmetic<R extends Support> {
   /**
@@ -32,7 +39,7 @@ export interface RowArithmetic<R extends Support> {
   eliminate(
     matrix: SymbolicMatrix,
     elements: readonly R[],
-    mode: EliminationMode,
+    task: EliminationTask,
     budget: Budget,
   ): Remainder<R>[];
 }

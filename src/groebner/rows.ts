@@ -84,6 +84,19 @@ export function coprimeRow(monomials: Int32Array, coefficients: readonly bigint[
   return { monomials, coefficients, small: asSmall(coefficients) };
 }
 
+/** As `coprimeRow`, from doubles below 2⁵³; most rows are never asked for their coefficients as big integers. */
+export function smallRow(monomials: Int32Array, small: Float64Array): ExactRow {
+  let coefficients: readonly bigint[] | undefined;
+  return {
+    monomials,
+    small,
+    get coefficients() {
+      coefficients ??= Array.from(small, BigInt);
+      return coefficients;
+    },
+  };
+}
+
 /**
  * The image of an exact row modulo the field's prime, made monic; `undefined` when the prime divides
  * the leading coefficient, so that the image has another leading monomial.

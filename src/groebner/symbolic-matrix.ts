@@ -37,11 +37,14 @@ export class SymbolicMatrix {
 
   /** The monomials of columns, brought into the table. */
   monomials(columns: Int32Array): Int32Array {
-    const variables = this.#table.variableCount;
-    return columns.map((column) => {
-      const number = this.#numbers[column] as number;
-      return this.#table.intern(this.workspace.exponentsOfColumn(number, variables));
-    });
+    const table = this.#table;
+    const exponents = new Uint16Array(table.variableCount);
+    const monomials = new Int32Array(columns.length);
+    for (let k = 0; k < columns.length; k++) {
+      this.workspace.readExponents(this.#numbers[columns[k] as number] as number, exponents);
+      monomials[k] = table.intern(exponents);
+    }
+    return monomials;
   }
 
   /** A row to reduce; columns ascending. */

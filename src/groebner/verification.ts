@@ -2,6 +2,7 @@
  * Is a given set a Gröbner basis of the ideal it generates? Decided over the rationals by exact
  * reduction of S-pairs; a failure comes with its witness.
  */
+
 import { type Budget, type Undecided, withinBudget } from "../outcomes/budget.js";
 import type { Exponents } from "../polynomials/exponents.js";
 import { type MonomialIdeal, monomialIdeal } from "../polynomials/monomial-ideal.js";
@@ -9,6 +10,7 @@ import { MonomialTable } from "../polynomials/monomial-table.js";
 import { finestGradingLater } from "../polynomials/multigrading.js";
 import { isZero, type Polynomial } from "../polynomials/polynomial.js";
 import type { TermOrder } from "../polynomials/term-order.js";
+import type { KnownBasis } from "./guided-basis.js";
 import { exactRow, leadingMonomial, monicPolynomial } from "./rows.js";
 import { checkPairs } from "./s-pair-check.js";
 
@@ -29,6 +31,8 @@ interface VerificationFacts {
   readonly pairsReduced: number;
   /** The ideal of the generators' leading monomials. */
   readonly leadingIdeal: MonomialIdeal;
+  /** The non-zero generators as rows: a known basis when they are one. */
+  readonly generators: KnownBasis;
 }
 
 /** The decision, exact over the rationals. */
@@ -61,6 +65,7 @@ export function verifyGenerators(
       evidence: "proved",
       pairsReduced: pairs,
       leadingIdeal: monomialIdeal(table.variableCount, leads),
+      generators: { table, rows },
     };
     if (failing === undefined) return { ...facts, verdict: "holds" };
     const { first, second, remainder } = failing;

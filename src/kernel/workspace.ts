@@ -22,6 +22,7 @@ export class Workspace {
   readonly #words: Uint32Array;
   readonly #signed: Int32Array;
   readonly #halves: Uint16Array;
+  readonly #bytes: Uint8Array;
   readonly #longs: BigInt64Array;
   /** Who divided the memory last. */
   #owner: object | undefined;
@@ -36,6 +37,7 @@ export class Workspace {
     this.#words = new Uint32Array(buffer);
     this.#signed = new Int32Array(buffer);
     this.#halves = new Uint16Array(buffer);
+    this.#bytes = new Uint8Array(buffer);
     this.#longs = new BigInt64Array(buffer);
     this.#regions = divideMemory(this.#words, { monomialBytes: 16, variables: 1, orderBytes: 0 });
   }
@@ -203,12 +205,13 @@ export class Workspace {
     return this.#signed.subarray(address >>> 2, (address >>> 2) + length);
   }
 
-  /** The exponents of a column, by its number before sorting. */
-  exponentsOfColumn(column: number, variables: number): Uint16Array {
+  /** Writes the exponents of a column, by its number before sorting. */
+  readExponents(column: number, exponents: Uint16Array): void {
     const start = this.#field(at.COLUMN_EXPONENTS_AT) + column * this.#field(at.MONOMIAL_BYTES_AT);
-    return this.#field(at.WIDE_AT) === 1
-      ? this.#halves.slice(start / 2, start / 2 + variables)
-      : Uint16Array.from(new Uint8Array(this.#words.buffer, start, variables));
+    const wide = this.#field(at.WIDE_AT) === 1;
+    const source = wide ? this.#halves : this.#bytes;
+    const from = wide ? start / 2 : start;
+    for (let v = 0; v < exponents.length; v++) exponents[v] = source[from + v] as number;
   }
 
   #entry(row: number): number {

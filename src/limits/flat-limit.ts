@@ -13,8 +13,8 @@ import { leadingMonomial } from "../groebner/rows.js";
 import type { Budget, Undecided } from "../outcomes/budget.js";
 import { leadingForm } from "../polynomials/leading-terms.js";
 import { type MonomialIdeal, monomialIdeal } from "../polynomials/monomial-ideal.js";
-import type { Polynomial } from "../polynomials/polynomial.js";
-import type { TermOrder } from "../polynomials/term-order.js";
+import { type Polynomial, polynomial } from "../polynomials/polynomial.js";
+import { isPartial, type TermOrder } from "../polynomials/term-order.js";
 
 /** The flat limit of an ideal, with the basis it was read off. */
 export interface FlatLimit {
@@ -42,8 +42,10 @@ export function flatLimit(
 ): FlatLimit | Undecided {
   const basis = rationalBasis(generators, order, budget, options);
   if (basis.kind === "undecided") return basis;
-  const forms = basis.elements.map((g) => leadingForm(g, order));
   const leads = basis.rows.map((row) => basis.table.exponents(leadingMonomial(row)));
+  const forms = isPartial(order)
+    ? basis.elements.map((g) => leadingForm(g, order))
+    : leads.map((monomial) => polynomial(order.ring, [{ monomial, numerator: 1n }]));
   return {
     kind: "flat-limit",
     order,

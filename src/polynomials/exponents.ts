@@ -43,7 +43,9 @@ export function dividesExponents(a: Exponents, b: Exponents): boolean {
 
 /** The least common multiple of two monomials. */
 export function lcmExponents(a: Exponents, b: Exponents): Exponents {
-  return a.map((e, i) => Math.max(e, b[i] as number));
+  const lcm = new Uint16Array(a.length);
+  for (let i = 0; i < a.length; i++) lcm[i] = Math.max(a[i] as number, b[i] as number);
+  return lcm;
 }
 
 /** The total degree of a monomial. */

@@ -33,11 +33,28 @@ export function finestGrading(polynomials: readonly Polynomial[]): Multigrading 
   for (const f of polynomials) {
     const [lead, ...others] = f.monomials;
     for (const m of others) {
-      const difference = sparseDifference(lead as Exponents, m);
-      weights = orthogonalTo(weights, difference);
+      if (!haveSameDegrees(weights, lead as Exponents, m)) {
+        weights = orthogonalTo(weights, sparseDifference(lead as Exponents, m));
+      }
     }
   }
   return { weights };
+}
+
+/** Have two monomials the same degree for every weight? */
+function haveSameDegrees(weights: readonly Int32Array[], a: Exponents, b: Exponents): boolean {
+  const places = new Int32Array(a.length);
+  let count = 0;
+  for (let v = 0; v < a.length; v++) if (a[v] !== b[v]) places[count++] = v;
+  for (const weight of weights) {
+    let difference = 0;
+    for (let k = 0; k < count; k++) {
+      const v = places[k] as number;
+      difference += (weight[v] as number) * ((a[v] as number) - (b[v] as number));
+    }
+    if (difference !== 0) return false;
+  }
+  return true;
 }
 
 /** The finest grading of the polynomials, computed when it is first asked for. */

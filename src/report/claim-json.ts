@@ -8,8 +8,8 @@ import type { LimitDescription } from "../claims/limit-description.js";
 import type { Question } from "../claims/question.js";
 import type { TilingsClaim } from "../claims/tilings-claim.js";
 import type { PrimaryComponent } from "../components/primary-components.js";
+import { largestDegree } from "../groebner/rational-basis.js";
 import { isList } from "../outcomes/budget.js";
-import { totalDegree } from "../polynomials/exponents.js";
 import { printMonomial, printPolynomial } from "../polynomials/printing.js";
 import { type ProblemDocument, problemDocument } from "../problems/problem-document.js";
 
@@ -77,14 +77,10 @@ export function tilingsClaimJson(claim: TilingsClaim, seconds: number): Json {
 
 function limitBody(description: LimitDescription): Json {
   const { limit, ideal, order, components } = description;
-  const degrees = limit.basis.elements.flatMap((g) => g.monomials.map(totalDegree));
   return {
     ...head(description),
     evidence: description.evidence,
-    basis: {
-      size: limit.basis.elements.length,
-      maxDegree: degrees.reduce((a, b) => Math.max(a, b), 0),
-    },
+    basis: { size: limit.basis.rows.length, maxDegree: largestDegree(limit.basis) },
     limit: {
       generators: limit.generators.map((f) => printPolynomial(f, order)),
       monomial: limit.monomial,

@@ -132,7 +132,12 @@ function limitFoot(description: LimitDescription, seconds: number): string[] {
   const { limit, unmixed } = description;
   const mixed =
     unmixed === null ? [] : [unmixed ? "no embedded components" : "there are embedded components"];
-  const basis = `reduced basis of ${counted(limit.basis.elements.length, "element")}, S-pairs reduced exactly`;
+  const { rows, primes } = limit.basis;
+  const how =
+    primes.length > 0
+      ? "S-pairs reduced exactly"
+      : "exact, complete by the Hilbert function of a proved basis";
+  const basis = `reduced basis of ${counted(rows.length, "element")}, ${how}`;
   return [...mixed, evidence(basis, seconds)];
 }
 

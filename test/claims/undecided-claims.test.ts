@@ -19,24 +19,25 @@ function until(word: string): Budget {
   };
 }
 
-const question = schubertQuestion("21543", "lex from nw by rows");
+/** A new ideal every time: what is once proved of an ideal is remembered. */
+const asked = () => schubertQuestion("21543", "lex from nw by rows");
 
 describe("claims that meet a limit", () => {
   it("are undecided when the generators cannot be written out", () => {
-    expect(decideGroebner(question, until("minor"))).toMatchObject({ kind: "undecided" });
-    expect(describeLimit(question, until("minor"))).toMatchObject({ kind: "undecided" });
+    expect(decideGroebner(asked(), until("minor"))).toMatchObject({ kind: "undecided" });
+    expect(describeLimit(asked(), until("minor"))).toMatchObject({ kind: "undecided" });
   });
 
   it("are undecided when the verification or the basis is not reached", () => {
-    expect(decideGroebner(question, until("S-pair"))).toMatchObject({ kind: "undecided" });
-    expect(describeLimit(question, until("degree"))).toMatchObject({ kind: "undecided" });
-    expect(matchTilings({ ...question, tilingKind: "bumpless" }, until("lifting"))).toMatchObject({
+    expect(decideGroebner(asked(), until("S-pair"))).toMatchObject({ kind: "undecided" });
+    expect(describeLimit(asked(), until("degree"))).toMatchObject({ kind: "undecided" });
+    expect(matchTilings({ ...asked(), tilingKind: "bumpless" }, until("reducing"))).toMatchObject({
       kind: "undecided",
     });
   });
 
   it("keep the limit when only the tilings are not reached", () => {
-    const claim = matchTilings({ ...question, tilingKind: "bumpless" }, until("tilings"));
+    const claim = matchTilings({ ...asked(), tilingKind: "bumpless" }, until("tilings"));
     expect(claim).toMatchObject({
       kind: "tilings-claim",
       description: { degree: 14n },
@@ -60,7 +61,7 @@ describe("claims that meet a limit", () => {
   });
 
   it("leave out the reduced basis when it may take no time", () => {
-    expect(decideGroebner(question, unlimited())).toMatchObject({
+    expect(decideGroebner(asked(), unlimited())).toMatchObject({
       verdict: "fails",
       basis: undefined,
     });

@@ -1,16 +1,12 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import {
-  codimensionOf,
-  degreeOf,
-  hilbertNumerator,
-} from "../../src/components/hilbert-numerator.js";
-import {
   multiplicityAt,
   type PrimaryComponent,
   primaryComponents,
   primaryIdeal,
 } from "../../src/components/primary-components.js";
+import { codimensionOf, degreeOf, hilbertNumerator } from "../../src/hilbert/hilbert-numerator.js";
 import { isList, startBudget, unlimited } from "../../src/outcomes/budget.js";
 import { type MonomialIdeal, monomialIdeal } from "../../src/polynomials/monomial-ideal.js";
 import {

@@ -4,7 +4,7 @@ import { primeField } from "../../src/arithmetic/prime-field.js";
 import { DivisorSearch } from "../../src/groebner/divisor-search.js";
 import { exactArithmetic } from "../../src/groebner/exact-elimination.js";
 import { modularArithmetic } from "../../src/groebner/modular-elimination.js";
-import type { EliminationMode } from "../../src/groebner/row-arithmetic.js";
+import type { EliminationMode, EliminationTask } from "../../src/groebner/row-arithmetic.js";
 import {
   type ExactRow,
   exactRow,
@@ -24,6 +24,11 @@ import { orderOf, polynomials, ring, termSet } from "../support/reading.js";
 const r = ring("x y z");
 const order = orderOf(r, "graded lex");
 
+/** All that there is to find in a mode. */
+function task(mode: EliminationMode): EliminationTask {
+  return { mode, most: Infinity };
+}
+
 /** Reduces polynomials by a set, in one matrix over the integers. */
 function reduceExactly(
   set: readonly Polynomial[],
@@ -33,7 +38,7 @@ function reduceExactly(
   const table = new MonomialTable(order);
   const elements: ExactRow[] = [...set, ...rows].map((f) => exactRow(table, f));
   const matrix = matrixOf(table, elements, set.length);
-  const left = exactArithmetic().eliminate(matrix, elements, mode, unlimited());
+  const left = exactArithmetic().eliminate(matrix, elements, task(mode), unlimited());
   return {
     remainders: left.map(({ row }) => rowPolynomial(r, table, row)),
     sources: left.map(({ source }) => source),
@@ -112,7 +117,7 @@ describe("exact matrix reduction", () => {
           const reduce = (elements: ExactRow[]) => {
             const matrix = matrixOf(table, elements, Math.min(2, elements.length));
             return exactArithmetic()
-              .eliminate(matrix, elements, chosen, unlimited())
+              .eliminate(matrix, elements, task(chosen), unlimited())
               .map(({ row, source }) => [source, [...row.monomials], [...row.coefficients]]);
           };
           expect(reduce(small)).toEqual(reduce(large));
@@ -136,7 +141,7 @@ describe("exact matrix reduction", () => {
     const reduce = (text: string, mode: EliminationMode): (readonly bigint[])[] => {
       const elements = [...set, ...polynomials(many, [text])].map((f) => exactRow(table, f));
       const matrix = matrixOf(table, elements, set.length);
-      const left = exactArithmetic().eliminate(matrix, elements, mode, unlimited());
+      const left = exactArithmetic().eliminate(matrix, elements, task(mode), unlimited());
       return left.map(({ row }) => row.coefficients);
     };
     expect(reduce("t0", "independent")).toEqual([[1n]]);
@@ -153,7 +158,7 @@ describe("exact matrix reduction", () => {
     let time = 0;
     const budget = startBudget({ seconds: 0.2, now: () => time++ });
     const outcome = withinBudget(() =>
-      exactArithmetic().eliminate(matrix, elements, "independent", budget),
+      exactArithmetic().eliminate(matrix, elements, task("independent"), budget),
     );
     expect(outcome).toMatchObject({ kind: "undecided", limit: "seconds" });
     expect((outcome as Undecided).reason).toMatch(
@@ -207,7 +212,7 @@ describe("modular matrix reduction", () => {
           const left = modularArithmetic(field).eliminate(
             matrix,
             elements,
-            "independent",
+            task("independent"),
             unlimited(),
           );
           const exact = reduceExactly(set, rows, "independent");

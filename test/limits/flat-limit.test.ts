@@ -1,7 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { hilbertNumerator } from "../../src/components/hilbert-numerator.js";
 import { determinantalIdeal } from "../../src/families/determinantal.js";
+import { hilbertNumerator } from "../../src/hilbert/hilbert-numerator.js";
 import { type FlatLimit, flatLimit } from "../../src/limits/flat-limit.js";
 import { startBudget, unlimited } from "../../src/outcomes/budget.js";
 import { leadingForm } from "../../src/polynomials/leading-terms.js";

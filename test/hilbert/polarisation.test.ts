@@ -1,8 +1,8 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { polarise } from "../../src/components/polarisation.js";
+import { polarise } from "../../src/hilbert/polarisation.js";
 import { dividesExponents, type Exponents, totalDegree } from "../../src/polynomials/exponents.js";
-import { idealOf, randomMonomialIdeal } from "./samples.js";
+import { idealOf, randomMonomialIdeal } from "../components/samples.js";
 
 const ideals = randomMonomialIdeal({ variables: 12, generators: 9, largest: 6 });
 

@@ -5,10 +5,14 @@ import {
   degreeOf,
   hilbertNumerator,
   reducedNumerator,
-} from "../../src/components/hilbert-numerator.js";
+} from "../../src/hilbert/hilbert-numerator.js";
 import { startBudget, unlimited } from "../../src/outcomes/budget.js";
 import type { MonomialIdeal } from "../../src/polynomials/monomial-ideal.js";
-import { minimalTransversals, numeratorByCounting, numeratorByInclusion } from "./by-definition.js";
+import {
+  minimalTransversals,
+  numeratorByCounting,
+  numeratorByInclusion,
+} from "../components/by-definition.js";
 import {
   complementsOfCyclicFacets,
   diagonalIdeal,
@@ -17,7 +21,7 @@ import {
   randomMonomialIdeal,
   randomRenaming,
   renamedIdeal,
-} from "./samples.js";
+} from "../components/samples.js";
 
 const numeratorOf = (ideal: MonomialIdeal) => hilbertNumerator(ideal, unlimited());
 const hOf = (ideal: MonomialIdeal) => reducedNumerator(numeratorOf(ideal));
