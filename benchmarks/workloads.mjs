@@ -1,46 +1,44 @@
 /** The workloads of the benchmarks: fixed inputs, each returns a checksum that must not change. */
 import {
   decideGroebner,
+  describeLimit,
   matchTilings,
+  modularBasis,
   permutationsOf,
   rationalBasis,
   readFamilyIdeal,
   readOrder,
-  readPolynomial,
-  ringOfVariables,
   schubertIdeal,
   suggestedTilings,
   unlimited,
 } from "../dist/index.js";
+import { accept } from "./accept.mjs";
+import { cyclic, eco, katsura, noon } from "./systems.mjs";
 
-/** @import { Polynomial, Reading } from "../dist/index.js" */
+/** @import { Permutation, Polynomial } from "../dist/index.js" */
 
 /**
  * @typedef {object} Workload
  * @property {string} name
  * @property {() => string} run returns the checksum
+ * @property {boolean} [long] minutes, only run with `--long`
  */
 
-/**
- * @template T
- * @param {Reading<T>} reading
- * @returns {T}
- */
-function accept(reading) {
-  if (!reading.ok) throw new Error(reading.fault.message);
-  return reading.value;
-}
+const CORNERS = ["revlex from nw by rows", "lex from nw by rows"];
+/** A prime of 31 bits. */
+const PRIME = 2_147_483_647;
 
-/** @param {number} n @param {string[]} phrases @returns {Workload} */
-function symmetricGroup(n, phrases) {
+/** @param {number} n @param {boolean} [long] @returns {Workload} */
+function everything(n, long = false) {
   return {
-    name: `S_${n}: verify, limit, components, match in ${phrases.length} orders`,
+    name: `S_${n}: verify, limit, components, match in both corner orders`,
+    long,
     run() {
       let degrees = 0n;
       let holds = 0;
-      for (const phrase of phrases) {
-        for (const w of permutationsOf(n)) {
-          const ideal = schubertIdeal(w);
+      for (const w of permutationsOf(n)) {
+        const ideal = schubertIdeal(w);
+        for (const phrase of CORNERS) {
           const order = accept(readOrder(phrase, ideal.ring));
           const question = { ideal, generators: ideal.generatingSets[0], order };
           const groebner = decideGroebner(question, unlimited());
@@ -57,93 +55,139 @@ function symmetricGroup(n, phrases) {
   };
 }
 
-/** @param {string} name @param {string} order @returns {Workload} */
-function familyBasis(name, order) {
-  const ideal = accept(readFamilyIdeal(name));
-  return basisWorkload(`${name}, ${order}, over Q`, ideal.generatingSets[0].polynomials(), order);
-}
-
-/** @param {string} name @param {readonly Polynomial[]} generators @param {string} phrase @returns {Workload} */
-function basisWorkload(name, generators, phrase) {
-  const [first] = generators;
-  if (first === undefined) throw new Error("expected generators");
-  const order = accept(readOrder(phrase, first.ring));
+/** @param {number} n @param {boolean} [long] @returns {Workload} */
+function verifyDiagonal(n, long = false) {
   return {
-    name,
+    name: `S_${n}: verify CDG in lex from nw by rows`,
+    long,
     run() {
-      const basis = rationalBasis(generators, order, unlimited());
-      if (basis.kind === "undecided") throw new Error(basis.reason);
-      const terms = basis.elements.reduce((sum, g) => sum + g.monomials.length, 0);
-      return `${basis.elements.length} elements, ${terms} terms`;
+      let fails = 0;
+      for (const w of permutationsOf(n)) {
+        const claim = decideGroebner(diagonalQuestion(w), unlimited());
+        if (claim.kind === "undecided") throw new Error(claim.reason);
+        if (claim.verdict === "fails") fails++;
+      }
+      return `${fails} fail`;
     },
   };
 }
 
-/** @param {number} n @returns {Polynomial[]} */
-function katsura(n) {
-  const texts = [
-    `u0 - 1${range(n)
-      .map((i) => ` + 2*u${i + 1}`)
-      .join("")}`,
-  ];
-  for (let m = 0; m < n; m++) {
-    const quadrics = range(2 * n + 1)
-      .map((k) => k - n)
-      .filter((i) => Math.abs(m - i) <= n)
-      .map((i) => `u${Math.abs(i)}*u${Math.abs(m - i)}`);
-    texts.push(`${quadrics.join(" + ")} - u${m}`);
-  }
-  return inVariables(
-    range(n + 1).map((i) => `u${i}`),
-    texts,
-  );
+/** @param {number} n @param {boolean} [long] @returns {Workload} */
+function limitDiagonal(n, long = false) {
+  return {
+    name: `S_${n}: limit in lex from nw by rows`,
+    long,
+    run() {
+      let degrees = 0n;
+      for (const w of permutationsOf(n)) {
+        const description = describeLimit(diagonalQuestion(w), unlimited());
+        if (description.kind === "undecided") throw new Error(description.reason);
+        degrees += description.degree;
+      }
+      return `degrees ${degrees}`;
+    },
+  };
 }
 
-/** @param {number} n @returns {Polynomial[]} */
-function cyclic(n) {
-  const texts = range(n - 1).map((d) =>
-    range(n)
-      .map((i) =>
-        range(d + 1)
-          .map((k) => `x${(i + k) % n}`)
-          .join("*"),
-      )
-      .join(" + "),
-  );
-  return inVariables(
-    range(n).map((i) => `x${i}`),
-    [
-      ...texts,
-      `${range(n)
-        .map((i) => `x${i}`)
-        .join("*")} - 1`,
-    ],
-  );
+/** @param {Permutation} w */
+function diagonalQuestion(w) {
+  const ideal = schubertIdeal(w);
+  const generators = ideal.generatingSets.find(({ kind }) => kind === "cdg");
+  if (generators === undefined) throw new Error("no CDG generators");
+  return { ideal, generators, order: accept(readOrder("lex from nw by rows", ideal.ring)) };
 }
 
-/** @param {string[]} names @param {string[]} texts */
-function inVariables(names, texts) {
-  const ring = ringOfVariables(names);
-  return texts.map((text) => accept(readPolynomial(text, ring)));
+/** @param {string} name @param {string} phrase @returns {Workload} */
+function familyLimit(name, phrase) {
+  return {
+    name: `${name}: limit in ${phrase}`,
+    run() {
+      const ideal = accept(readFamilyIdeal(name));
+      const order = accept(readOrder(phrase, ideal.ring));
+      const [generators] = ideal.generatingSets;
+      const description = describeLimit({ ideal, generators, order }, unlimited());
+      if (description.kind === "undecided") throw new Error(description.reason);
+      return `${description.limit.basis.rows.length} elements, degree ${description.degree}`;
+    },
+  };
 }
 
-/** @param {number} n */
-function range(n) {
-  return Array.from({ length: n }, (_, i) => i);
+/** @param {string} name @param {string} phrase @returns {Workload} */
+function familyModulo(name, phrase) {
+  const ideal = accept(readFamilyIdeal(name));
+  return modulo(name, () => ideal.generatingSets[0].polynomials(), phrase);
 }
 
-const ORDERS = ["revlex from nw by rows", "lex from nw by rows"];
+/** @param {string} name @param {() => readonly Polynomial[]} make @param {string} [phrase] @returns {Workload} */
+function modulo(name, make, phrase = "graded revlex") {
+  return {
+    name: `${name} modulo a 31-bit prime`,
+    run() {
+      const generators = make();
+      const basis = modularBasis(generators, orderOf(generators, phrase), PRIME, unlimited());
+      if (basis.kind === "undecided") throw new Error(basis.reason);
+      return sizes(basis.elements);
+    },
+  };
+}
+
+/** @param {string} name @param {() => readonly Polynomial[]} make @param {boolean} [long] @returns {Workload} */
+function rational(name, make, long = false) {
+  return {
+    name: `${name} over Q, proved`,
+    long,
+    run() {
+      const generators = make();
+      const order = orderOf(generators, "graded revlex");
+      const basis = rationalBasis(generators, order, unlimited());
+      if (basis.kind === "undecided") throw new Error(basis.reason);
+      return sizes(basis.elements);
+    },
+  };
+}
+
+/** @param {readonly Polynomial[]} generators @param {string} phrase */
+function orderOf(generators, phrase) {
+  const [first] = generators;
+  if (first === undefined) throw new Error("expected generators");
+  return accept(readOrder(phrase, first.ring));
+}
+
+/** @param {readonly Polynomial[]} elements */
+function sizes(elements) {
+  const terms = elements.reduce((sum, g) => sum + g.monomials.length, 0);
+  return `${elements.length} elements, ${terms} terms`;
+}
 
 /** @type {Workload[]} */
 export const workloads = [
-  symmetricGroup(4, ORDERS),
-  symmetricGroup(5, ORDERS),
-  symmetricGroup(6, ORDERS),
-  basisWorkload("katsura-6 over Q", katsura(6), "graded revlex"),
-  basisWorkload("katsura-7 over Q", katsura(7), "graded revlex"),
-  basisWorkload("cyclic-5 over Q", cyclic(5), "graded revlex"),
-  basisWorkload("cyclic-6 over Q", cyclic(6), "graded revlex"),
-  familyBasis("determinantal:4,5,2", "lex from nw by rows"),
-  familyBasis("determinantal:5,6,2", "lex from nw by rows"),
-  familyBasis("schubert:21543", "lex from nw by rows"),
+  everything(5),
+  everything(6),
+  everything(7, true),
+  verifyDiagonal(6),
+  verifyDiagonal(7),
+  verifyDiagonal(8, true),
+  limitDiagonal(6),
+  limitDiagonal(7, true),
+  familyLimit("schubert:2143765", "lex from nw by rows"),
+  modulo("katsura-7", () => katsura(7)),
+  modulo("katsura-8", () => katsura(8)),
+  modulo("katsura-9", () => katsura(9)),
+  modulo("katsura-10", () => katsura(10)),
+  modulo("cyclic-6", () => cyclic(6)),
+  modulo("cyclic-7", () => cyclic(7)),
+  modulo("noon-4", () => noon(4)),
+  modulo("noon-5", () => noon(5)),
+  modulo("eco-8", () => eco(8)),
+  rational("katsura-7", () => katsura(7)),
+  rational("katsura-8", () => katsura(8)),
+  rational("katsura-9", () => katsura(9), true),
+  rational("cyclic-6", () => cyclic(6)),
+  rational("cyclic-7", () => cyclic(7), true),
+  rational("noon-4", () => noon(4)),
+  rational("noon-5", () => noon(5)),
+  rational("eco-8", () => eco(8)),
+  familyModulo("determinantal:5,6,2", "lex from nw by rows"),
+  familyModulo("determinantal:6,6,2", "lex from nw by rows"),
+  familyModulo("determinantal:6,6,3", "lex from nw by rows"),
 ];

@@ -37,6 +37,7 @@ export { type PrimaryComponent, primaryComponents } from "./components/primary-c
 export type { GeneratingSet, Ideal } from "./families/ideal.js";
 export { readFamilyIdeal } from "./families/registry.js";
 export { schubertIdeal } from "./families/schubert.js";
+export { type ModularBasis, modularBasis } from "./groebner/modular-basis.js";
 export { type RationalBasis, rationalBasis } from "./groebner/rational-basis.js";
 export {
   type Verification,

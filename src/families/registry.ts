@@ -4,6 +4,7 @@ import { nearestName } from "../polynomials/nearest-name.js";
 import { alternatingSignFamily } from "./alternating-sign.js";
 import { determinantalFamily } from "./determinantal.js";
 import type { Family, Ideal } from "./ideal.js";
+import { lowerUpperFamily } from "./lower-upper.js";
 import { partialPermutationFamily } from "./partial-permutation.js";
 import { schubertFamily } from "./schubert.js";
 
@@ -13,6 +14,7 @@ export const families: readonly Family[] = [
   partialPermutationFamily,
   alternatingSignFamily,
   determinantalFamily,
+  lowerUpperFamily,
 ];
 
 /** Reads `family:argument`. */

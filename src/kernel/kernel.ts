@@ -27,11 +27,11 @@ export interface MonomialKernel {
 /** Columns into the term order. */
 export interface ColumnKernel {
   /**
-   * Sorts the columns, largest monomial first. `order`: per comparison the count of its terms, then variable
-   * and weight of each, 8 bytes all. Returns the address, in scratch, of the columns' old numbers in order;
-   * scratch has 16 bytes a column, 24 a comparison, and 1 KiB.
+   * Sorts the columns, largest monomial first. From `order` to `orderEnd` stands, for each comparison, the count of
+   * its terms, then variable and weight of each, 8 bytes all. Returns the address, in scratch, of the columns'
+   * old numbers in order; scratch has 24 bytes a column and 1 KiB.
    */
-  sortColumns(order: number, comparisons: number, scratch: number): number;
+  sortColumns(order: number, orderEnd: number, scratch: number): number;
   /** Renumbers all rows so; rows outside `firstRow ≤ r < endRow` become the pivots of their first columns. */
   renumberColumns(sorted: number, ranks: number, firstRow: number, endRow: number): void;
 }
@@ -74,7 +74,47 @@ export interface RowKernel {
   ): number;
 }
 
+/**
+ * Elimination of four rows at once: an accumulator has 32 bytes a column, a lane for each row. Which representatives
+ * of a residue it holds is the kernel's own affair, but zero bytes are zeros.
+ */
+export interface LaneKernel {
+  /** Puts a row of residues into one lane of the cleared accumulator. */
+  loadLane(
+    accumulator: number,
+    lane: number,
+    columns: number,
+    coefficients: number,
+    length: number,
+  ): void;
+  /** In each lane, accumulator[columns[k]] −= multiplier · coefficients[k] modulo the prime, for first ≤ k < length. */
+  subtractFromLanes(
+    accumulator: number,
+    columns: number,
+    coefficients: number,
+    first: number,
+    length: number,
+    m0: number,
+    m1: number,
+    m2: number,
+    m3: number,
+    prime: number,
+  ): void;
+  /** Eliminates, in all lanes, every entry from column `from` on that has a pivot. */
+  sweepLanes(accumulator: number, from: number, width: number, prime: number): void;
+  /** Takes one lane out, from column `from` on, as a sparse row that is not made monic; its length. */
+  takeLane(
+    accumulator: number,
+    lane: number,
+    from: number,
+    width: number,
+    prime: number,
+    columns: number,
+    coefficients: number,
+  ): number;
+}
+
 /** All the hot loops, over one memory. */
-export interface Kernel extends MonomialKernel, ColumnKernel, RowKernel {
+export interface Kernel extends MonomialKernel, ColumnKernel, RowKernel, LaneKernel {
   readonly kind: "compiled" | "plain";
 }

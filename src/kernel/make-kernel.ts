@@ -1,7 +1,8 @@
 /** The two kernels over a memory: compiled where the machine allows it, plain everywhere. */
 import { COMPILED_KERNEL } from "./compiled.js";
-import type { ColumnKernel, Kernel, MonomialKernel, RowKernel } from "./kernel.js";
+import type { Kernel } from "./kernel.js";
 import { plainColumns } from "./plain-columns.js";
+import { plainFourRows } from "./plain-four-rows.js";
 import { plainMonomials } from "./plain-monomials.js";
 import { plainRows } from "./plain-rows.js";
 
@@ -19,6 +20,7 @@ export function plainKernel({ buffer }: KernelMemory): Kernel {
     ...plainMonomials(buffer),
     ...plainColumns(buffer),
     ...plainRows(buffer),
+    ...plainFourRows(buffer),
   };
 }
 
@@ -29,7 +31,7 @@ export function compiledKernel({ shared }: KernelMemory): Kernel | undefined {
     const bytes = Uint8Array.from(atob(COMPILED_KERNEL), (c) => c.charCodeAt(0));
     const module = new WebAssembly.Module(bytes);
     const { exports } = new WebAssembly.Instance(module, { env: { memory: shared } });
-    const functions = exports as unknown as MonomialKernel & ColumnKernel & RowKernel;
+    const functions = exports as unknown as Omit<Kernel, "kind">;
     return { kind: "compiled", ...functions };
   } catch {
     return undefined;

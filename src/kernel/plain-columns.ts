@@ -19,11 +19,10 @@ export function plainColumns(buffer: SharedArrayBuffer | ArrayBuffer): ColumnKer
   const longs = new BigInt64Array(buffer);
   const field = (at: number): number => words[at >>> 2]!;
 
-  /** The comparisons that stand at an address, as numbers. */
-  function readOrder(address: number, comparisons: number) {
+  /** The comparisons that stand between two addresses, as numbers. */
+  function readOrder(start: number, end: number) {
     const read: { readonly variables: number[]; readonly weights: number[] }[] = [];
-    let place = address / 8;
-    for (let c = 0; c < comparisons; c++) {
+    for (let place = start / 8; place < end / 8; ) {
       const terms = Array.from({ length: Number(longs[place]) }, (_, k) => place + 1 + 2 * k);
       read.push({
         variables: terms.map((term) => Number(longs[term])),
@@ -35,7 +34,7 @@ export function plainColumns(buffer: SharedArrayBuffer | ArrayBuffer): ColumnKer
   }
 
   return {
-    sortColumns(order, comparisons, scratch) {
+    sortColumns(order, orderEnd, scratch) {
       const size = field(MONOMIAL_BYTES_AT);
       const start = field(COLUMN_EXPONENTS_AT);
       const wide = field(WIDE_AT) === 1;
@@ -43,7 +42,7 @@ export function plainColumns(buffer: SharedArrayBuffer | ArrayBuffer): ColumnKer
         const at = start + column * size;
         return wide ? halves[at / 2 + v]! : bytes[at + v]!;
       };
-      const tests = readOrder(order, comparisons);
+      const tests = readOrder(order, orderEnd);
       const numbers = Uint32Array.from({ length: field(COLUMN_COUNT_AT) }, (_, k) => k);
       numbers.sort((a, b) => {
         for (const { variables, weights } of tests) {

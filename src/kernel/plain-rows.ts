@@ -6,6 +6,7 @@
  */
 import type { RowKernel } from "./kernel.js";
 import { COLUMN_PIVOTS_AT, ROWS_AT } from "./layout.js";
+import { residueProduct } from "./residue-product.js";
 
 const SMALL_PRIME_LIMIT = 2 ** 26;
 
@@ -17,7 +18,7 @@ export function plainRows(buffer: SharedArrayBuffer | ArrayBuffer): RowKernel {
 
   const addRow: RowKernel["addRow"] = (accumulator, columns, coefficients, length, m, p) => {
     const add = p < SMALL_PRIME_LIMIT ? addSmall : addLarge;
-    add(entries, words, accumulator >>> 3, columns >>> 2, coefficients >>> 2, length, m, p);
+    add(entries, signed, accumulator >>> 3, columns >>> 2, coefficients >>> 2, length, m, p);
   };
   return {
     addRow,
@@ -57,7 +58,7 @@ export function plainRows(buffer: SharedArrayBuffer | ArrayBuffer): RowKernel {
         entries[start + column] = 0;
         if (length === 0) factor = inverse(value, prime);
         words[(columns >>> 2) + length] = column;
-        words[(coefficients >>> 2) + length] = product(value, factor, prime);
+        words[(coefficients >>> 2) + length] = residueProduct(value, factor, prime);
         length++;
       }
       return length;
@@ -67,7 +68,7 @@ export function plainRows(buffer: SharedArrayBuffer | ArrayBuffer): RowKernel {
 
 function addSmall(
   entries: Float64Array,
-  words: Uint32Array,
+  words: Int32Array,
   accumulator: number,
   columns: number,
   coefficients: number,
@@ -100,7 +101,7 @@ function addSmall(
 
 function addLarge(
   entries: Float64Array,
-  words: Uint32Array,
+  words: Int32Array,
   accumulator: number,
   columns: number,
   coefficients: number,
@@ -110,18 +111,9 @@ function addLarge(
 ): void {
   for (let k = 0; k < length; k++) {
     const c = accumulator + words[columns + k]!;
-    const x = entries[c]! + product(words[coefficients + k]!, multiplier, p);
+    const x = entries[c]! + residueProduct(words[coefficients + k]!, multiplier, p);
     entries[c] = x >= p ? x - p : x;
   }
-}
-
-/** a·b modulo p < 2³¹. */
-function product(a: number, b: number, p: number): number {
-  const high = Math.floor(b / 65_536);
-  const low = b - high * 65_536;
-  const x = high * a;
-  const y = (x - Math.floor(x / p) * p) * 65_536 + low * a;
-  return y - Math.floor(y / p) * p;
 }
 
 /** The inverse of a residue, by the extended algorithm of Euclid. */

@@ -29,7 +29,7 @@ export class Workspace {
   #regions: Regions;
   #monomialCount = 0;
   #termsUsed = 0;
-  #comparisons = 0;
+  #orderEnd = 0;
 
   /** A workspace in the given memory, all zero, with the given kernel. */
   constructor({ buffer }: KernelMemory, kernel: Kernel) {
@@ -70,7 +70,7 @@ export class Workspace {
     this.#monomialCount = 0;
     this.#termsUsed = this.#regions.terms;
     this.#signed.set(table.hashWeights, this.#field(at.HASH_WEIGHTS_AT) >>> 2);
-    this.#comparisons = this.#writeOrder(table);
+    this.#orderEnd = this.#writeOrder(table);
     this.clear();
   }
 
@@ -91,13 +91,18 @@ export class Workspace {
       const count = Math.min(atOnce, size - first);
       const staging = this.#field(at.HEAP_AT);
       this.#halves.set(table.exponentsBetween(first, first + count), staging / 2);
-      const exponents = this.#field(at.MONOMIAL_EXPONENTS_AT) + first * bytes;
+      const exponents = this.addressOfMonomial(first);
       const hashes = this.#field(at.MONOMIAL_HASHES_AT) + 4 * first;
       const done = this.kernel.pack(staging, variableCount, count, exponents, hashes);
       if (done !== at.DONE) return false;
       this.#monomialCount = first + count;
     }
     return true;
+  }
+
+  /** Where the packed monomial with an id stands, once it was brought in. */
+  addressOfMonomial(id: number): number {
+    return this.#field(at.MONOMIAL_EXPONENTS_AT) + id * this.#field(at.MONOMIAL_BYTES_AT);
   }
 
   /** Sets the leading monomials that reduce, their support masks, and the elements they belong to. */
@@ -127,11 +132,11 @@ export class Workspace {
    */
   arrangeColumns(firstRow: number, endRow: number): Uint32Array {
     const count = this.columnCount;
-    const sortBytes = 16 * count + 24 * this.#comparisons + 1024;
+    const sortBytes = 24 * count + 1024;
     const scratch = this.reserve(sortBytes + 4 * count);
-    const sorted = this.kernel.sortColumns(this.#regions.order, this.#comparisons, scratch) >>> 0;
+    const sorted = this.kernel.sortColumns(this.#regions.order, this.#orderEnd, scratch) >>> 0;
     const numbers = this.#words.slice(sorted >>> 2, (sorted >>> 2) + count);
-    this.kernel.renumberColumns(sorted, roundUp(scratch + sortBytes, 4), firstRow, endRow);
+    this.kernel.renumberColumns(sorted, scratch + sortBytes, firstRow, endRow);
     this.release(scratch);
     return numbers;
   }
@@ -188,6 +193,11 @@ export class Workspace {
     return row;
   }
 
+  /** Leaves the first columns without pivots. */
+  forgetPivots(width: number): void {
+    this.integers(this.#field(at.COLUMN_PIVOTS_AT), width).fill(-1);
+  }
+
   /** Makes a row the pivot of its first column. */
   makePivot(row: number): void {
     const columns = this.#words[this.#entry(row) + 2] as number;
@@ -227,7 +237,7 @@ export class Workspace {
     return start;
   }
 
-  /** Writes the comparisons for `sortColumns`; how many. */
+  /** Writes the comparisons for `sortColumns`; where they end. */
   #writeOrder({ order, variableCount }: MonomialTable): number {
     let place = this.#regions.order / 8;
     const write = (variables: readonly number[], weights: readonly number[]): void => {
@@ -240,7 +250,7 @@ export class Workspace {
     const all = Array.from({ length: variableCount }, (_, v) => v);
     if (order.degreeFirst) write(all, new Array<number>(variableCount).fill(1));
     for (const { variables, weights } of order.comparisons) write(variables, weights);
-    return order.comparisons.length + (order.degreeFirst ? 1 : 0);
+    return 8 * place;
   }
 
   #field(address: number): number {

@@ -3,7 +3,7 @@
  * tilings with pipes bending one way and the other.
  */
 import type { VariableIndex, VariableMatrix } from "./polynomial-ring.js";
-import type { TermOrder } from "./term-order.js";
+import { compileDecisiveComparison, type TermOrder } from "./term-order.js";
 
 /** Does an order take the diagonal term of every minor of a matrix, the antidiagonal, or neither? */
 export type MinorTerms = "diagonal" | "antidiagonal" | "neither";
@@ -19,31 +19,41 @@ export type MinorTerms = "diagonal" | "antidiagonal" | "neither";
  * Cost: quadratic in the number of cells.
  */
 export function minorTerms(order: TermOrder, matrix: VariableMatrix): MinorTerms {
-  const signs = new Set<number>();
+  const compare = productComparer(order);
   const { cells } = matrix;
   const cell = (i: number, j: number): VariableIndex => cells[i]?.[j] as VariableIndex;
+  let common: number | undefined;
   for (let i = 0; i < matrix.rows; i++) {
     for (let k = i + 1; k < matrix.rows; k++) {
       for (let j = 0; j < matrix.columns; j++) {
         for (let l = j + 1; l < matrix.columns; l++) {
-          signs.add(compareProducts(order, [cell(i, j), cell(k, l)], [cell(i, l), cell(k, j)]));
+          const sign = compare([cell(i, j), cell(k, l)], [cell(i, l), cell(k, j)]);
+          common ??= sign;
+          if (sign === 0 || sign !== common) return "neither";
         }
       }
     }
   }
-  if (signs.size !== 1 || signs.has(0)) return "neither";
-  return signs.has(1) ? "diagonal" : "antidiagonal";
+  if (common === undefined) return "neither";
+  return common === 1 ? "diagonal" : "antidiagonal";
 }
 
 type Product = readonly [VariableIndex, VariableIndex];
 
 /* The sign with which two products of two variables differ in the decisive comparisons. */
-function compareProducts(order: TermOrder, a: Product, b: Product): number {
-  for (const { variables, weights } of order.comparisons.slice(0, order.decisive)) {
-    const weight = (product: Product): number =>
-      product.reduce((sum, v) => sum + (weights[variables.indexOf(v)] ?? 0), 0);
-    const sign = Math.sign(weight(a) - weight(b));
-    if (sign !== 0) return sign;
-  }
-  return 0;
+function productComparer(order: TermOrder): (a: Product, b: Product) => number {
+  const count = order.ring.variables.length;
+  const compare = compileDecisiveComparison(order);
+  const arena = new Uint16Array(2 * count);
+  const mark = (start: number, product: Product, by: number): void => {
+    for (const v of product) arena[start + v] = (arena[start + v] as number) + by;
+  };
+  return (a, b) => {
+    mark(0, a, 1);
+    mark(count, b, 1);
+    const sign = Math.sign(compare(arena, 0, count));
+    mark(0, a, -1);
+    mark(count, b, -1);
+    return sign;
+  };
 }

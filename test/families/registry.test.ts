@@ -28,7 +28,13 @@ function printed(name: string, kind?: string): string[] {
 
 describe("readFamilyIdeal", () => {
   it("reads the example of every family, whose default order fits", () => {
-    expect(families.map((f) => f.name)).toEqual(["schubert", "partial", "asm", "determinantal"]);
+    expect(families.map((f) => f.name)).toEqual([
+      "schubert",
+      "partial",
+      "asm",
+      "determinantal",
+      "lower-upper",
+    ]);
     for (const family of families) {
       const ideal = idealOf(family.example);
       expect(ideal.name).toBe(family.example);
@@ -48,7 +54,7 @@ describe("readFamilyIdeal", () => {
     for (const word of ["veronese", "", "constructor", "toString"]) {
       expect(faultOf(`${word}:1`)).toMatchObject({
         message: `unknown family "${word}"`,
-        expected: "one of schubert, partial, asm, determinantal",
+        expected: "one of schubert, partial, asm, determinantal, lower-upper",
       });
     }
   });

@@ -269,7 +269,7 @@ describe("limits of a computation", () => {
   });
 
   it("end as undecided when the user cancels in the middle, in every stage of a long computation", () => {
-    const generators = katsura(4);
+    const generators = katsura(5);
     const order = orderOf((generators[0] as Polynomial).ring, "graded lex");
     const stages = new Set<string>();
     for (let stopAt = 1; ; stopAt = Math.ceil(stopAt * 1.3)) {

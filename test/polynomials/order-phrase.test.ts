@@ -33,7 +33,7 @@ describe("phrases of orders", () => {
     expect(orderOf(r, "dual from nw by rows then lex from se by columns")).toEqual(order);
     expect(order.phrase).toBe("dual from nw by rows refined by lex from se by columns");
     expect(order.decisive).toBe(4);
-    expect(orderOf(r, "dual from nw by rows then revlex from nw by rows")).toEqual(
+    expect(orderOf(r, "dual from nw by rows then lex from nw by rows")).toEqual(
       orderOf(r, "dual from nw by rows"),
     );
   });

@@ -1,6 +1,6 @@
 /**
- * Columns into the term order: weights are packed into 64-bit keys as tightly as their ranges allow and
- * sorted by radix, the last key first. AssemblyScript; the twin is `plain-columns.ts`.
+ * Columns into the term order: the first comparisons are packed into 64-bit keys as tightly as their ranges allow
+ * and sorted by radix; what is equal then is sorted by the others. AssemblyScript; the twin is `plain-columns.ts`.
  */
 import {
   COLUMN_COUNT_AT,
@@ -25,7 +25,7 @@ function weightOf(monomial: usize, comparison: usize, wide: i32): i64 {
   return weight;
 }
 
-/** One stable pass: the permutation at `from` goes to `to`, by the byte of the keys at `shift`. */
+/** One stable pass over part of a permutation, `from` to `to`, by the byte of the keys at `shift`. */
 function radixPass(
   keys: usize,
   from: usize,
@@ -36,7 +36,8 @@ function radixPass(
 ): void {
   memory.fill(histogram, 0, 1024);
   for (let k: usize = 0; k < <usize>count; k++) {
-    const at = histogram + ((<usize>((load<u64>(keys + (k << 3)) >> shift) & 255)) << 2);
+    const key = load<u64>(keys + ((<usize>load<u32>(from + (k << 2))) << 3));
+    const at = histogram + ((<usize>((key >> shift) & 255)) << 2);
     store<u32>(at, load<u32>(at) + 1);
   }
   let sum: u32 = 0;
@@ -56,72 +57,127 @@ function radixPass(
   }
 }
 
-/**
- * Sorts the columns, largest first. `order` lists the comparisons; `scratch` has room for 16 bytes a
- * column, 24 a comparison, and 1 KiB. Returns the address, within scratch, of the columns in order.
- */
-export function sortColumns(order: usize, comparisons: i32, scratch: usize): usize {
-  const count = load<i32>(COLUMN_COUNT_AT);
+/** Part of a permutation up to this long is sorted by insertion. */
+const SHORT: i32 = 12;
+
+/** Sorts part of a permutation by insertion: largest keys last, then by the comparisons from `order` on. */
+function insertionSort(columns: usize, count: i32, order: usize, orderEnd: usize): void {
   const bytes = <usize>load<i32>(MONOMIAL_BYTES_AT);
   const exponents = <usize>load<u32>(COLUMN_EXPONENTS_AT);
   const wide = load<i32>(WIDE_AT);
-  const keys = scratch;
-  let from = keys + ((<usize>count) << 3);
-  let to = from + ((<usize>count) << 2);
-  const histogram = to + ((<usize>count) << 2);
-  const ranges = histogram + 1024;
-  // Of each comparison the largest weight, how many bits the range takes, and where it stands.
+  for (let k = 1; k < count; k++) {
+    const column = load<u32>(columns + ((<usize>k) << 2));
+    const monomial = exponents + (<usize>column) * bytes;
+    let place = k;
+    while (place > 0) {
+      const before = load<u32>(columns + ((<usize>(place - 1)) << 2));
+      const other = exponents + (<usize>before) * bytes;
+      let larger = false;
+      for (let at = order; at < orderEnd; at += 8 + ((<usize>load<i32>(at)) << 4)) {
+        const difference = weightOf(monomial, at, wide) - weightOf(other, at, wide);
+        if (difference != 0) {
+          larger = difference > 0;
+          break;
+        }
+      }
+      if (!larger) break;
+      store<u32>(columns + ((<usize>place) << 2), before);
+      place--;
+    }
+    store<u32>(columns + ((<usize>place) << 2), column);
+  }
+}
+
+/**
+ * Sorts part of a permutation, largest first, by the comparisons from `order` on. As many comparisons as fit
+ * make one 64-bit key; runs of equal keys are sorted by the comparisons that are left.
+ */
+function sortPart(
+  columns: usize,
+  count: i32,
+  order: usize,
+  orderEnd: usize,
+  keys: usize,
+  spare: usize,
+  weights: usize,
+  histogram: usize,
+): void {
+  if (count <= SHORT) {
+    insertionSort(columns, count, order, orderEnd);
+    return;
+  }
+  const bytes = <usize>load<i32>(MONOMIAL_BYTES_AT);
+  const exponents = <usize>load<u32>(COLUMN_EXPONENTS_AT);
+  const wide = load<i32>(WIDE_AT);
+  for (let k: usize = 0; k < <usize>count; k++) {
+    store<u64>(keys + ((<usize>load<u32>(columns + (k << 2))) << 3), 0);
+  }
+  let bits: u64 = 0;
   let at = order;
-  for (let c: usize = 0; c < <usize>comparisons; c++) {
+  while (at < orderEnd) {
     let least = i64.MAX_VALUE;
     let most = i64.MIN_VALUE;
     for (let k: usize = 0; k < <usize>count; k++) {
-      const weight = weightOf(exponents + k * bytes, at, wide);
+      const column = <usize>load<u32>(columns + (k << 2));
+      const weight = weightOf(exponents + column * bytes, at, wide);
+      store<i64>(weights + (k << 3), weight);
       if (weight < least) least = weight;
       if (weight > most) most = weight;
     }
-    const range = ranges + c * 24;
-    store<i64>(range, most);
-    store<u64>(range, most <= least ? 0 : 64 - clz<u64>(<u64>(most - least)), 8);
-    store<u64>(range, <u64>at, 16);
+    const size: u64 = most == least ? 0 : 64 - clz<u64>(<u64>(most - least));
+    if (bits + size > 64) break;
     at += 8 + ((<usize>load<i32>(at)) << 4);
-  }
-  for (let k: u32 = 0; k < <u32>count; k++) store<u32>(from + ((<usize>k) << 2), k);
-  let end = comparisons;
-  while (end > 0) {
-    // As many comparisons as fit into one key, from the last one up.
-    let bits: u64 = 0;
-    let start = end;
-    while (start > 0) {
-      const more = load<u64>(ranges + (<usize>(start - 1)) * 24, 8);
-      if (bits + more > 64) break;
-      bits += more;
-      start--;
+    if (size == 0) continue;
+    bits += size;
+    for (let k: usize = 0; k < <usize>count; k++) {
+      const key = keys + ((<usize>load<u32>(columns + (k << 2))) << 3);
+      const digit = <u64>(most - load<i64>(weights + (k << 3)));
+      store<u64>(key, size == 64 ? digit : (load<u64>(key) << size) | digit);
     }
-    if (bits > 0) {
-      for (let k: usize = 0; k < <usize>count; k++) store<u64>(keys + (k << 3), 0);
-      for (let c = <usize>start; c < <usize>end; c++) {
-        const range = ranges + c * 24;
-        const size = load<u64>(range, 8);
-        if (size == 0) continue;
-        const most = load<i64>(range);
-        const comparison = <usize>load<u64>(range, 16);
-        for (let k: usize = 0; k < <usize>count; k++) {
-          const weight = weightOf(exponents + k * bytes, comparison, wide);
-          const key = load<u64>(keys + (k << 3));
-          store<u64>(keys + (k << 3), (key << size) | <u64>(most - weight));
-        }
-      }
-      for (let shift: u64 = 0; shift < bits; shift += 8) {
-        radixPass(keys, from, to, count, shift, histogram);
-        const other = from;
-        from = to;
-        to = other;
-      }
-    }
-    end = start;
   }
-  return from;
+  let from = columns;
+  let to = spare;
+  for (let shift: u64 = 0; shift < bits; shift += 8) {
+    radixPass(keys, from, to, count, shift, histogram);
+    const other = from;
+    from = to;
+    to = other;
+  }
+  if (from != columns) memory.copy(columns, from, (<usize>count) << 2);
+  if (at >= orderEnd) return;
+  // What is equal so far is told apart by the rest; the keys of a run are not needed any more.
+  let start = 0;
+  while (start < count) {
+    const key = load<u64>(keys + ((<usize>load<u32>(columns + ((<usize>start) << 2))) << 3));
+    let end = start + 1;
+    while (
+      end < count &&
+      load<u64>(keys + ((<usize>load<u32>(columns + ((<usize>end) << 2))) << 3)) == key
+    ) {
+      end++;
+    }
+    if (end - start > 1) {
+      const part = columns + ((<usize>start) << 2);
+      sortPart(part, end - start, at, orderEnd, keys, spare, weights, histogram);
+    }
+    start = end;
+  }
+}
+
+/**
+ * Sorts the columns, largest first. `order` to `orderEnd` lists the comparisons; `scratch` has room for 24 bytes a
+ * column and 1 KiB. Returns the address, within scratch, of the columns in order.
+ */
+export function sortColumns(order: usize, orderEnd: usize, scratch: usize): usize {
+  const count = load<i32>(COLUMN_COUNT_AT);
+  const keys = scratch;
+  const weights = keys + ((<usize>count) << 3);
+  const columns = weights + ((<usize>count) << 3);
+  const spare = columns + ((<usize>count) << 2);
+  const histogram = spare + ((<usize>count) << 2);
+  for (let k: u32 = 0; k < <u32>count; k++) store<u32>(columns + ((<usize>k) << 2), k);
+  sortPart(columns, count, order, orderEnd, keys, spare, weights, histogram);
+  return columns;
 }
 
 /**
