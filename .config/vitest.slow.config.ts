@@ -3,7 +3,7 @@ import { mergeConfig } from "vite";
 import { defineConfig } from "vitest/config";
 import fast from "./vitest.config.js";
 
-const { include: _include, exclude: _exclude, ...shared } = fast.test ?? {};
+const { projects: _projects, ...shared } = fast.test ?? {};
 
 export default mergeConfig(
   defineConfig({ ...fast, test: shared }),
