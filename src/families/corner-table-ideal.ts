@@ -5,7 +5,7 @@ import {
   ringOfMatrices,
   type VariableMatrix,
 } from "../polynomials/polynomial-ring.js";
-import type { Ideal } from "./ideal.js";
+import { type Ideal, madeOnce } from "./ideal.js";
 import { rankMinors } from "./rank-ideal.js";
 
 /** The ideal of a table of corner rank bounds on a generic matrix in variables z. */
@@ -28,13 +28,14 @@ export function cornerBoundsIdeal(
       {
         kind: "fulton",
         description: "the minors of the corners whose bounds the others do not imply",
-        polynomials: (budget) =>
+        polynomials: madeOnce((budget) =>
           rankMinors(ring, matrix, essentialBounds(table), undefined, budget),
+        ),
       },
       {
         kind: "defining",
         description: "the minors of all corners",
-        polynomials: (budget) => rankMinors(ring, matrix, table, undefined, budget),
+        polynomials: madeOnce((budget) => rankMinors(ring, matrix, table, undefined, budget)),
       },
     ],
     defaultOrder: "revlex from nw by rows",

@@ -22,6 +22,17 @@ export interface GeneratingSet {
   polynomials(budget?: Budget): readonly Polynomial[];
 }
 
+/** Generators made when they are first asked for, and kept as long as the ideal is. */
+export function madeOnce(
+  make: (budget: Budget | undefined) => readonly Polynomial[],
+): GeneratingSet["polynomials"] {
+  let made: readonly Polynomial[] | undefined;
+  return (budget) => {
+    made ??= make(budget);
+    return made;
+  };
+}
+
 /** An ideal that can be verified, degenerated and matched. */
 export interface Ideal {
   /** What names it on the command line: `schubert:2143`, or the problem's path. */

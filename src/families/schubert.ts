@@ -21,7 +21,7 @@ import type {
   VariableMatrix,
 } from "../polynomials/polynomial-ring.js";
 import { cornerTableIdeal } from "./corner-table-ideal.js";
-import type { Family, GeneratingSet, Ideal } from "./ideal.js";
+import { type Family, type GeneratingSet, type Ideal, madeOnce } from "./ideal.js";
 import { rankMinors } from "./rank-ideal.js";
 
 /** The family of matrix Schubert varieties. */
@@ -45,8 +45,9 @@ export function schubertIdeal(w: Permutation): Ideal {
   const cdg: GeneratingSet = {
     kind: "cdg",
     description: "the variables of the dominant part, and the Fulton minors without them",
-    polynomials: (budget) =>
+    polynomials: madeOnce((budget) =>
       cdgGenerators(byCorners.ring, matrix, corners, dominantVariables(w, matrix), budget),
+    ),
   };
   return {
     ...byCorners,

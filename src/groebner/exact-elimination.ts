@@ -19,6 +19,8 @@ interface PivotRow {
 }
 
 const EXACT_LIMIT = Number.MAX_SAFE_INTEGER;
+/** Rows of so many columns more count once more against the budget. */
+const COLUMNS_OF_ONE_SPEND = 4096;
 /** After this many scalings by big integers the content of the row is divided out. */
 const SCALINGS_BETWEEN_CONTENTS = 8;
 
@@ -76,7 +78,10 @@ function reduceMatrix(
   const pivots = new Pivots(matrix, elements);
   const accumulator = new Float64Array(width);
   const reduce = (row: PivotRow, from: number): PivotRow | undefined => {
-    budget.spend(() => `reducing a matrix of ${width} columns exactly`);
+    budget.spend(
+      () => `reducing a matrix of ${width} columns exactly`,
+      1 + width / COLUMNS_OF_ONE_SPEND,
+    );
     const quick = reduceInDoubles(row, pivots, accumulator, from);
     return (quick ?? reduceInBigIntegers(row, pivots, width, from, budget)).reduced;
   };

@@ -13,9 +13,9 @@ export function modularArithmetic(field: PrimeField): RowArithmetic<ModularRow> 
   return {
     eliminate(matrix, _elements, { mode, most }, budget) {
       const { workspace, width, firstRow, rowCount } = matrix;
-      const sweeper = new Sweeper(workspace, width, field.prime, () => {
-        budget.spend(() => `reducing a matrix of ${width} columns modulo ${field.prime}`);
-      });
+      const stage = (): string => `reducing a matrix of ${width} columns modulo ${field.prime}`;
+      const work = 1 + width / COLUMNS_OF_ONE_SPEND;
+      const sweeper = new Sweeper(workspace, width, field.prime, () => budget.spend(stage, work));
       const rows = Array.from({ length: rowCount }, (_, source): ColumnRow => {
         return { ...workspace.placeOfRow(firstRow + source), source };
       });
@@ -49,6 +49,8 @@ interface ColumnRow {
   readonly source: number;
 }
 
+/** Rows of so many columns more count once more against the budget. */
+const COLUMNS_OF_ONE_SPEND = 8192;
 const LANES = 4;
 /** Fewer rows than this are not worth a look at how dense they are. */
 const ROWS_WORTH_LANES = 8;

@@ -29,8 +29,10 @@ export interface MatrixRequest {
   readonly pivots: readonly Multiple[];
 }
 
-/** Terms placed between two looks at the budget. */
-const FUEL = 100_000;
+/** Terms placed at a time: some milliseconds, more where memory is touched for the first time. */
+const FUEL = 50_000;
+/** How much of a budget's patience that takes. */
+const WORK_OF_FUEL = 4;
 
 /** Builds matrices over one table, one at a time: a matrix is gone when the next is built. */
 export class SymbolicPreprocessing {
@@ -89,7 +91,7 @@ export class SymbolicPreprocessing {
       if (this.#place(row) === undefined) return undefined;
     }
     for (let state = -1; state !== at.DONE; ) {
-      budget.spend(() => `preparing a matrix of ${space.columnCount} columns`);
+      budget.spend(() => `preparing a matrix of ${space.columnCount} columns`, WORK_OF_FUEL);
       state = space.kernel.closeMatrix(FUEL);
       if (state === at.EXPONENT_TOO_LARGE) return undefined;
       if (state === at.OUT_OF_SPACE) full("columns or rows");

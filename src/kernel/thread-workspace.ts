@@ -9,22 +9,34 @@ import { Workspace } from "./workspace.js";
 
 const PAGE = 65_536;
 const LARGEST = 2 ** 32;
+/** Without WebAssembly: an array of this size is had nearly everywhere. */
+const LARGEST_WITHOUT = 2 ** 30;
 const SMALLEST = 2 ** 25;
 
-/** The largest memory that can be had: half after half is tried. */
+/** The largest memory that can be had: half after half is tried, with WebAssembly and then without. */
 function largestMemory(): KernelMemory {
-  for (let size = LARGEST; ; size /= 2) {
+  const shared = typeof WebAssembly === "undefined" ? undefined : largest(LARGEST, sharedMemory);
+  if (shared !== undefined) return { buffer: shared.buffer, shared };
+  const buffer = largest(LARGEST_WITHOUT, (bytes) => new ArrayBuffer(bytes));
+  if (buffer === undefined) throw new RangeError(`expected ${SMALLEST} bytes of memory, got none`);
+  return { buffer, shared: undefined };
+}
+
+function sharedMemory(bytes: number): WebAssembly.Memory {
+  const pages = bytes / PAGE;
+  return new WebAssembly.Memory({ initial: pages, maximum: pages, shared: true });
+}
+
+/** What `make` makes of the largest size for which it does not throw; undefined when it always does. */
+function largest<T>(size: number, make: (bytes: number) => T): T | undefined {
+  for (let bytes = size; bytes >= SMALLEST; bytes /= 2) {
     try {
-      if (typeof WebAssembly === "undefined") {
-        return { buffer: new ArrayBuffer(Math.min(size, LARGEST / 4)), shared: undefined };
-      }
-      const pages = size / PAGE;
-      const shared = new WebAssembly.Memory({ initial: pages, maximum: pages, shared: true });
-      return { buffer: shared.buffer, shared };
-    } catch (error) {
-      if (size <= SMALLEST) throw error;
+      return make(bytes);
+    } catch {
+      // Addresses are limited here; half as many may do.
     }
   }
+  return undefined;
 }
 
 /** A new workspace; the compiled kernel is taken where it runs, unless another is wished. */

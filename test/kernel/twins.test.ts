@@ -1,5 +1,5 @@
 import fc from "fast-check";
-import { describe, expect, it } from "vitest";
+import { describe, expect, it, vi } from "vitest";
 import * as at from "../../src/kernel/layout.js";
 import { createWorkspace } from "../../src/kernel/thread-workspace.js";
 import type { Workspace } from "../../src/kernel/workspace.js";
@@ -117,6 +117,23 @@ describe("the compiled kernel and its plain twin", () => {
   it("exist both on this machine", () => {
     expect(workspaces.map(({ kernel }) => kernel.kind)).toEqual(["compiled", "plain"]);
     expect(createWorkspace().kernel.kind).toBe("compiled");
+  });
+
+  it("do without WebAssembly, or without the addresses it takes", () => {
+    const given = scene(3, "graded lex", [[Uint16Array.of(1, 2, 0)]], [Uint16Array.of(0, 1, 1)]);
+    const wanted = matrixOf(workspaces[1] as Workspace, given, false, 100);
+    class Refused {
+      constructor() {
+        throw new RangeError("no memory");
+      }
+    }
+    for (const stub of [undefined, { ...WebAssembly, Memory: Refused }]) {
+      vi.stubGlobal("WebAssembly", stub);
+      const space = createWorkspace();
+      vi.unstubAllGlobals();
+      expect(space.kernel.kind).toBe("plain");
+      expect(matrixOf(space, given, false, 100)).toEqual(wanted);
+    }
   });
 
   it("make the same matrices, and these hold products, sorted, with reducers where leads divide", () => {

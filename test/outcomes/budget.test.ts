@@ -29,6 +29,18 @@ function exhaust(budget: Budget, calls = 10_000): Undecided {
 }
 
 describe("a budget", () => {
+  it("look at the clock at once for a call that stands for much work, and rarely for others", () => {
+    let time = 0;
+    const looks = (work: number | undefined): number => {
+      time = 0;
+      const budget = startBudget({ now: () => time++ });
+      const before = time;
+      for (let k = 0; k < 16; k++) budget.spend(() => "counting", work);
+      return time - before;
+    };
+    expect([looks(8), looks(4), looks(1), looks(undefined)]).toEqual([16, 8, 2, 2]);
+  });
+
   it("ends a computation when its seconds are over, and says where it was", () => {
     const outcome = exhaust(startBudget({ seconds: 1, now: clock(300) }));
     expect(outcome).toMatchObject({ kind: "undecided", limit: "seconds" });
