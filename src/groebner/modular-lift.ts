@@ -1,10 +1,11 @@
 /**
  * From reduced bases modulo several primes to one over the rationals: bases with the same leading
  * monomials are joined coefficient by coefficient, and reconstructed as rationals once the residues
- * determine them. Residues wait until a lift is tried, and then an element is joined with all its waiting
- * primes at once: most attempts fail at the element that failed before, so that the others wait on.
+ * determine them. Residues wait until their element is tried, and are then joined all at once: most attempts
+ * fail at the element that failed before, so that the others wait on; an element that was lifted before is
+ * only compared with the images that came since.
  */
-import type { PrimeField } from "../arithmetic/prime-field.js";
+import { type PrimeField, primeField } from "../arithmetic/prime-field.js";
 import { manyRemaindersJoiner, reconstructTogether } from "../arithmetic/reconstruction.js";
 import type { Budget } from "../outcomes/budget.js";
 import type { MonomialId, MonomialTable } from "../polynomials/monomial-table.js";
@@ -25,9 +26,10 @@ export class JoinedBases {
 
   /** Joins the reduced basis modulo one more prime. */
   add(prime: number, rows: readonly ModularRow[]): void {
+    const field = primeField(prime);
     rows.forEach((row, k) => {
       if (this.#primes.length === 0) this.#elements.push(new JoinedElement());
-      (this.#elements[k] as JoinedElement).add(row);
+      (this.#elements[k] as JoinedElement).add(field, row);
     });
     this.#primes = [...this.#primes, prime];
     this.#joiners.clear();
@@ -45,7 +47,7 @@ export class JoinedBases {
         () => `lifting ${this.#elements.length} elements from ${this.#primes.length} primes`,
       );
       const element = this.#elements[k] as JoinedElement;
-      const row = element.reconstruct(this.#joiner(element.primesJoined), table);
+      const row = element.known() ?? element.reconstruct(this.#joiner(element.primesJoined), table);
       if (row === undefined) {
         this.#hardest = k;
         return undefined;
@@ -76,66 +78,95 @@ interface Joiner {
   readonly modulus: bigint;
 }
 
+interface Image {
+  readonly field: PrimeField;
+  readonly row: ModularRow;
+}
+
 /** The residues of one element's coefficients. */
 class JoinedElement {
-  /** All monomials that have occurred, in no particular order. */
+  /** All monomials that have occurred, largest first. */
   #monomials = new Int32Array(0);
   /** For each monomial the residue modulo the primes joined so far. */
   #joined: bigint[] = [];
   #primesJoined = 0;
-  /** For each further prime the residues, one a monomial; missing ones at the end are 0. */
-  #waiting: Int32Array[] = [];
+  /** What those primes gave, while the waiting ones agree. */
+  #lifted: ExactRow | undefined;
+  #waiting: Image[] = [];
+  /** How many of the waiting primes have been seen to agree with what is lifted. */
+  #agreeing = 0;
 
   get primesJoined(): number {
     return this.#primesJoined;
   }
 
-  add({ monomials, coefficients }: ModularRow): void {
-    this.#waiting.push(
-      isSameArray(monomials, this.#monomials)
-        ? coefficients
-        : this.#aligned(monomials, coefficients),
-    );
+  add(field: PrimeField, row: ModularRow): void {
+    this.#waiting.push({ field, row });
   }
 
-  /** The residues at the places of the monomials known so far; new ones get places at the end. */
-  #aligned(monomials: Int32Array, coefficients: Int32Array): Int32Array {
-    const places = new Map(Array.from(this.#monomials, (id, place) => [id, place]));
-    for (const id of monomials) if (!places.has(id)) places.set(id, places.size);
-    if (places.size > this.#monomials.length) this.#monomials = Int32Array.from(places.keys());
-    const aligned = new Int32Array(places.size);
-    monomials.forEach((id, t) => {
-      aligned[places.get(id) as number] = coefficients[t] as number;
-    });
-    return aligned;
+  /** As lifted before, if it is within the bounds and the primes that came since have the same image. */
+  known(): ExactRow | undefined {
+    while (this.#lifted !== undefined && this.#agreeing < this.#waiting.length) {
+      const { field, row } = this.#waiting[this.#agreeing] as Image;
+      if (isImage(field, this.#lifted, row)) this.#agreeing++;
+      else this.#lifted = undefined;
+    }
+    return this.#lifted;
   }
 
   reconstruct({ join, modulus }: Joiner, table: MonomialTable): ExactRow | undefined {
-    this.#join(join);
-    const joined = this.#joined;
-    const order = Array.from(this.#monomials.keys()).sort((a, b) =>
-      table.compare(this.#monomials[b] as MonomialId, this.#monomials[a] as MonomialId),
-    );
-    const values = order.map((place) => joined[place] as bigint);
-    const lifted = reconstructTogether(values, modulus);
+    this.#join(join, table);
+    const lifted = reconstructTogether(this.#joined, modulus);
     if (lifted === undefined) return undefined;
     const kept = lifted.numerators.flatMap((n, k) => (n === 0n ? [] : [k]));
-    return coprimeRow(
-      Int32Array.from(kept, (k) => this.#monomials[order[k] as number] as number),
+    this.#lifted = coprimeRow(
+      Int32Array.from(kept, (k) => this.#monomials[k] as number),
       kept.map((k) => lifted.numerators[k] as bigint),
     );
+    this.#agreeing = 0;
+    return this.#lifted;
   }
 
-  #join(join: Joiner["join"]): void {
+  #join(join: Joiner["join"], table: MonomialTable): void {
     const waiting = this.#waiting;
     if (waiting.length === 0) return;
+    this.#makePlaces(table);
+    const images = waiting.map(({ row }) => this.#placed(row));
     const residues = new Int32Array(waiting.length);
     this.#joined = Array.from(this.#monomials, (_, place) => {
-      for (let k = 0; k < waiting.length; k++) residues[k] = (waiting[k] as Int32Array)[place] ?? 0;
+      for (let k = 0; k < images.length; k++) {
+        residues[k] = (images[k] as Int32Array)[place] as number;
+      }
       return join(this.#joined[place] ?? 0n, residues);
     });
     this.#primesJoined += waiting.length;
     this.#waiting = [];
+  }
+
+  /** Brings in the monomials of the waiting rows; new ones are rare after the first time. */
+  #makePlaces(table: MonomialTable): void {
+    const old = this.#monomials;
+    const residues = new Map(Array.from(old, (id, place) => [id, this.#joined[place] as bigint]));
+    for (const { row } of this.#waiting) {
+      if (isSameArray(row.monomials, this.#monomials)) continue;
+      for (const id of row.monomials) if (!residues.has(id)) residues.set(id, 0n);
+      this.#monomials = Int32Array.from(residues.keys()).sort((a, b) =>
+        table.compare(b as MonomialId, a as MonomialId),
+      );
+    }
+    this.#joined = Array.from(this.#monomials, (id) => residues.get(id) as bigint);
+  }
+
+  /** The residues at the places of their monomials. */
+  #placed({ monomials, coefficients }: ModularRow): Int32Array {
+    if (isSameArray(monomials, this.#monomials)) return coefficients;
+    const placed = new Int32Array(this.#monomials.length);
+    let place = 0;
+    for (let t = 0; t < monomials.length; t++) {
+      while (this.#monomials[place] !== monomials[t]) place++;
+      placed[place] = coefficients[t] as number;
+    }
+    return placed;
   }
 }
 
@@ -153,14 +184,15 @@ export function areImages(
 ): boolean {
   return (
     exact.length === modular.length &&
-    exact.every((row, k) => {
-      const image = modularRow(field, row);
-      const other = modular[k] as ModularRow;
-      return (
-        image !== undefined &&
-        isSameArray(image.monomials, other.monomials) &&
-        isSameArray(image.coefficients, other.coefficients)
-      );
-    })
+    exact.every((row, k) => isImage(field, row, modular[k] as ModularRow))
+  );
+}
+
+function isImage(field: PrimeField, exact: ExactRow, modular: ModularRow): boolean {
+  const image = modularRow(field, exact);
+  return (
+    image !== undefined &&
+    isSameArray(image.monomials, modular.monomials) &&
+    isSameArray(image.coefficients, modular.coefficients)
   );
 }
