@@ -6,18 +6,17 @@
 import { type CornerRanks, cornerSums, essentialBounds } from "../combinatorics/corner-ranks.js";
 import {
   type Permutation,
+  permutation,
   printPermutation,
   readPermutation,
 } from "../combinatorics/permutation.js";
-import { read } from "../outcomes/input-fault.js";
-import { isZero, type Polynomial, polynomial, type Term } from "../polynomials/polynomial.js";
-import {
-  type PolynomialRing,
-  ringOfMatrices,
-  type VariableIndex,
-  type VariableMatrix,
-} from "../polynomials/polynomial-ring.js";
-import type { Family, Ideal } from "./ideal.js";
+import type { Budget } from "../outcomes/budget.js";
+import { faulty, read } from "../outcomes/input-fault.js";
+import type { Polynomial } from "../polynomials/polynomial.js";
+import type { VariableIndex, VariableMatrix } from "../polynomials/polynomial-ring.js";
+import { type Family, type Ideal, madeOnce } from "./ideal.js";
+import { triangularEquations } from "./lower-upper-scheme.js";
+import { MAX_PAIR_SIZE, productEntry, type SquarePair, squarePair } from "./matrix-pair.js";
 import { rankMinors } from "./rank-ideal.js";
 
 /** The family of lower-upper varieties. */
@@ -28,92 +27,72 @@ export const lowerUpperFamily: Family = {
   example: "lower-upper:132",
   read(argument) {
     const w = readPermutation(argument);
-    return w.ok ? read(lowerUpperIdeal(w.value)) : w;
+    if (!w.ok) return w;
+    if (w.value.length <= MAX_PAIR_SIZE) return read(lowerUpperIdeal(w.value));
+    return faulty({
+      message: `a lower-upper variety of a permutation of ${w.value.length} values`,
+      expected: `at most ${MAX_PAIR_SIZE}`,
+    });
   },
 };
 
 /**
- * The ideal that the listed generators of E_w generate. It lies in the ideal of E_w and has its codimension and
- * degree for every w with n ≤ 4; that it is all of it is not assumed anywhere.
+ * The ideal that these generate, all sums over k = 1 … n:
+ * - `Σ x_ik·y_kj` for i < j and `Σ y_ik·x_kj` for i > j, the n² − n equations of the scheme;
+ * - `Σ x_ik·y_ki − Σ y_jk·x_kj`, j = w(i), for i = 1 … n−1; that for i = n is minus their sum, as XY and YX have
+ *   the same trace;
+ * - the (r+1)-minors of the northwest i×j corner of X, r = #{a ≤ i : w(a) ≤ j}, for (i,j) in the essential set;
+ * - the (r+1)-minors of the southeast corner of Yᵗ with rows i … n and columns j … n, that is of Y with rows
+ *   j … n and columns i … n, r = #{a ≥ i : w(a) ≥ j}, for the bounds that the others do not imply.
+ *
+ * The minors of all other corners are in the ideal of these (Fulton, Duke Math. J. 65 (1992), lemma 3.10).
+ *
+ * It lies in the prime ideal of E_w, and has its codimension and degree for n ≤ 4. For n ≤ 3, and for n = 4 unless
+ * w = 1324, it is that ideal: some initial ideal is unmixed, hence so is the ideal, and the degrees add up to
+ * 2^(n² − n), those of the varieties. For 1324 it is smaller, and vanishes at more points: on E_1324 also
+ * `((XY)_22 − (XY)_11)·x_2j + (XY)_21·x_1j = 0`, j = 1, 2, and
+ * `((YX)_33 − (YX)_44)·y_3j + (YX)_34·y_4j = 0`, j = 3, 4; with these it is prime.
  */
 export function lowerUpperIdeal(w: Permutation): Ideal {
-  const n = w.length;
-  const ring = ringOfMatrices(
-    [
-      { name: "x", rows: n, columns: n },
-      { name: "y", rows: n, columns: n },
-    ],
-    { x: "x", y: "y" },
-  );
-  const [x, y] = ring.matrices as [VariableMatrix, VariableMatrix];
+  const pair = squarePair(w.length);
   return {
     name: `lower-upper:${printPermutation(w)}`,
-    ring,
+    ring: pair.ring,
     generatingSets: [
       {
         kind: "listed",
         description: "the equations of the scheme, those of the diagonals, and minors of X and Y",
-        polynomials: (budget) => [
-          ...triangularEquations(ring, x, y),
-          ...diagonalEquations(ring, x, y, w),
-          ...rankMinors(ring, x, essentialBounds(northwestRanks(w)), undefined, budget),
-          ...rankMinors(ring, transposed(y), essentialBounds(southeastRanks(w)), undefined, budget),
-        ],
+        polynomials: madeOnce((budget) => listedGenerators(pair, w, budget)),
       },
     ],
     defaultOrder: "dual from nw by rows",
   };
 }
 
-/** The entries of XY above the diagonal and of YX below it. */
-function triangularEquations(
-  ring: PolynomialRing,
-  x: VariableMatrix,
-  y: VariableMatrix,
-): Polynomial[] {
-  const equations: Polynomial[] = [];
-  for (let i = 0; i < x.rows; i++) {
-    for (let j = 0; j < x.rows; j++) {
-      if (i < j) equations.push(polynomial(ring, productEntry(ring, x, y, i, j, 1n)));
-      if (i > j) equations.push(polynomial(ring, productEntry(ring, y, x, i, j, 1n)));
-    }
-  }
-  return equations;
+function listedGenerators(pair: SquarePair, w: Permutation, budget?: Budget): Polynomial[] {
+  const { ring, x, y } = pair;
+  const northwest = essentialBounds(northwestRanks(w));
+  const southeast = essentialBounds(southeastRanks(w));
+  return [
+    ...triangularEquations(pair, budget),
+    ...diagonalEquations(pair, w, budget),
+    ...rankMinors(ring, x, northwest, undefined, budget),
+    ...rankMinors(ring, transposed(y), southeast, undefined, budget),
+  ];
 }
 
-/** (XY)_ii − (YX)_w(i)w(i) for all i but the last: they add up to zero, since the traces agree. */
-function diagonalEquations(
-  ring: PolynomialRing,
-  x: VariableMatrix,
-  y: VariableMatrix,
-  w: Permutation,
-): Polynomial[] {
+/** (XY)_ii − (YX)_w(i)w(i) for all i but the last. */
+function diagonalEquations(pair: SquarePair, w: Permutation, budget?: Budget): Polynomial[] {
   return w
     .slice(0, -1)
     .map((value, i) =>
-      polynomial(ring, [
-        ...productEntry(ring, x, y, i, i, 1n),
-        ...productEntry(ring, y, x, value - 1, value - 1, -1n),
-      ]),
-    )
-    .filter((f) => !isZero(f));
-}
-
-/** The terms of ± the entry (i, j) of a product of two matrices, from 0. */
-function productEntry(
-  ring: PolynomialRing,
-  left: VariableMatrix,
-  right: VariableMatrix,
-  i: number,
-  j: number,
-  sign: bigint,
-): Term[] {
-  return Array.from({ length: left.columns }, (_, k) => {
-    const monomial = new Uint16Array(ring.variables.length);
-    monomial[left.cells[i]?.[k] as VariableIndex] = 1;
-    monomial[right.cells[k]?.[j] as VariableIndex] = 1;
-    return { monomial, numerator: sign };
-  });
+      productEntry(
+        pair,
+        { product: "XY", row: i, column: i },
+        { product: "YX", row: value - 1, column: value - 1 },
+        budget,
+      ),
+    );
 }
 
 function transposed(matrix: VariableMatrix): VariableMatrix {
@@ -130,7 +109,6 @@ function northwestRanks(w: Permutation): CornerRanks {
 
 /** The ranks of its southeast corners: those of the matrix turned by 180°, which is that of w₀ww₀. */
 function southeastRanks(w: Permutation): CornerRanks {
-  const n = w.length;
-  const turned = w.map((_, i) => n + 1 - (w[n - 1 - i] as number));
-  return { ...northwestRanks(turned as unknown as Permutation), corner: "se" };
+  const turned = w.map((value) => w.length + 1 - value).reverse();
+  return { ...northwestRanks(permutation(turned)), corner: "se" };
 }

@@ -2,9 +2,11 @@
 import { faulty, quote, type Reading } from "../outcomes/input-fault.js";
 import { nearestName } from "../polynomials/nearest-name.js";
 import { alternatingSignFamily } from "./alternating-sign.js";
+import { commutingFamily } from "./commuting.js";
 import { determinantalFamily } from "./determinantal.js";
 import type { Family, Ideal } from "./ideal.js";
 import { lowerUpperFamily } from "./lower-upper.js";
+import { lowerUpperSchemeFamily } from "./lower-upper-scheme.js";
 import { partialPermutationFamily } from "./partial-permutation.js";
 import { schubertFamily } from "./schubert.js";
 
@@ -15,6 +17,8 @@ export const families: readonly Family[] = [
   alternatingSignFamily,
   determinantalFamily,
   lowerUpperFamily,
+  lowerUpperSchemeFamily,
+  commutingFamily,
 ];
 
 /** Reads `family:argument`. */

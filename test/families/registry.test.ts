@@ -34,6 +34,8 @@ describe("readFamilyIdeal", () => {
       "asm",
       "determinantal",
       "lower-upper",
+      "lower-upper-scheme",
+      "commuting",
     ]);
     for (const family of families) {
       const ideal = idealOf(family.example);
@@ -54,7 +56,8 @@ describe("readFamilyIdeal", () => {
     for (const word of ["veronese", "", "constructor", "toString"]) {
       expect(faultOf(`${word}:1`)).toMatchObject({
         message: `unknown family "${word}"`,
-        expected: "one of schubert, partial, asm, determinantal, lower-upper",
+        expected:
+          "one of schubert, partial, asm, determinantal, lower-upper, lower-upper-scheme, commuting",
       });
     }
   });
@@ -101,6 +104,10 @@ describe("readFamilyIdeal", () => {
     ["determinantal:101,1,0", "is no determinantal ideal"],
     ["determinantal:1,101,0", "is no determinantal ideal"],
     ["determinantal:3,4,-1", "is no determinantal ideal"],
+    ["lower-upper:122", "the value 2 stands twice"],
+    [`lower-upper:${Array.from({ length: 31 }, (_, i) => i + 1)}`, "of 31 values"],
+    ["lower-upper-scheme:0", "is no size of two square matrices"],
+    ["commuting:31", "is no size of two square matrices"],
   ])("refuses %s", (name, message) => {
     const fault = faultOf(name);
     expect(fault.message).toContain(message);
@@ -108,7 +115,7 @@ describe("readFamilyIdeal", () => {
   });
 
   it("never throws, and reads the names of what it reads back to the same", () => {
-    const word = fc.constantFrom("schubert", "partial", "asm", "determinantal", "shubert", "");
+    const word = fc.constantFrom(...families.map((f) => f.name), "shubert", "");
     const signs = fc.constantFrom(..."0123456789,,/+-: \n\u0000x…".split(""));
     const argument = fc.oneof(fc.string({ unit: signs, maxLength: 12 }), fc.string());
     fc.assert(
